@@ -1,0 +1,61 @@
+import { z } from 'zod';
+import { day, id, instant, metres, notes, pageOf, pageQuery } from './common';
+import { surfaces, weathers } from './trade';
+
+export const rideInput = z.object({
+  bikeId: id,
+  day,
+  distanceM: metres('The distance', 2000).min(1, 'Give a distance of more than nothing.'),
+  movingS: z
+    .number()
+    .int()
+    .min(0)
+    .max(7 * 86_400)
+    .nullable()
+    .default(null),
+  surface: z.enum(surfaces),
+  weather: z.enum(weathers),
+  notes: notes.default(''),
+});
+export type RideInput = z.infer<typeof rideInput>;
+/** POST /api/rides may carry an Idempotency-Key header: sent twice, it is kept once. */
+export const ride = rideInput.extend({
+  id,
+  chainId: id.nullable(),
+  startedAt: instant.nullable(),
+  source: z.enum(['typed', 'csv', 'gpx', 'tcx', 'fit']),
+});
+export type Ride = z.infer<typeof ride>;
+export const ridePage = pageOf(ride);
+export const rideQuery = pageQuery.extend({
+  bikeId: id.optional(),
+  chainId: id.optional(),
+  riderId: id.optional(),
+  from: day.optional(),
+  to: day.optional(),
+});
+export type RideQuery = z.infer<typeof rideQuery>;
+
+/** GET /api/rides/by-day?chainId=…|bikeId=…: sums for charts, metres by day. */
+export const ridingDay = z.object({ day, distanceM: z.number(), lubeM: z.number(), wearM: z.number() });
+
+/** POST /api/imports (multipart: file, bikeId or chainId, surface and weather for what the file does not say) */
+export const importTarget = z.object({
+  bikeId: id,
+  surface: z.enum(surfaces).default('road'),
+  weather: z.enum(weathers).default('unknown'),
+});
+/** GET /api/imports/:id, polled while it runs. */
+export const rideImport = z.object({
+  id,
+  fileName: z.string(),
+  state: z.enum(['waiting', 'running', 'done', 'failed']),
+  total: z.number().int(),
+  added: z.number().int(),
+  alreadyThere: z.number().int(),
+  refused: z.number().int(),
+  /** What was wrong, line by line, at most the first 50. */
+  problems: z.array(z.object({ line: z.number().int(), message: z.string() })),
+  message: z.string(),
+});
+export type RideImport = z.infer<typeof rideImport>;
