@@ -1,0 +1,25 @@
+import { CanActivate, ExecutionContext, Injectable } from '@nestjs/common';
+import { Reflector } from '@nestjs/core';
+import { roleMay } from '@halfpitch/contracts';
+import type { Request } from 'express';
+import type { Actor } from './actor';
+import { REQUIREMENT, Requirement } from './permit';
+import { forbidden, ProblemException } from './problems';
+
+@Injectable()
+export class PermitGuard implements CanActivate {
+  constructor(private readonly reflector: Reflector) {}
+
+  canActivate(context: ExecutionContext): boolean {
+    const requirement = this.reflector.getAllAndOverride<Requirement | undefined>(REQUIREMENT, [
+      context.getHandler(),
+      context.getClass(),
+    ]);
+    if (requirement === 'public') return true;
+    const actor = context.switchToHttp().getRequest<Request>().user as Actor | undefined;
+    if (!actor) throw new ProblemException(401, 'Not signed in', 'Sign in first.');
+    if (requirement === 'signed-in') return true;
+    if (requirement && roleMay(actor.role, requirement)) return true;
+    throw forbidden('Your role in this workshop does not include that.');
+  }
+}
