@@ -1,0 +1,55 @@
+import { appendFileSync } from 'node:fs';
+import { spawnBound } from './bound-child.mjs';
+
+const running = new Set();
+
+/**
+ * Runs a command to its end. Its output is returned and, with `log`, appended to that file as it comes;
+ * `onLine` sees each line of stdout.
+ * @returns {Promise<{ code: number | null, stdout: string, stderr: string }>}
+ */
+export function run(command, args, { log, input, onLine, ...options } = {}) {
+  return new Promise((resolve) => {
+    const stdin = input === undefined ? 'ignore' : 'pipe';
+    const child = spawnBound(command, args, { stdio: [stdin, 'pipe', 'pipe'], ...options });
+    running.add(child);
+    const text = { stdout: '', stderr: '' };
+    let partLine = '';
+    const take = (name) => (chunk) => {
+      text[name] += chunk;
+      if (log) appendFileSync(log, chunk);
+      if (name !== 'stdout' || !onLine) return;
+      const lines = (partLine + chunk).split('\n');
+      partLine = lines.pop();
+      lines.forEach((line) => onLine(line));
+    };
+    child.stdout.setEncoding('utf8').on('data', take('stdout'));
+    child.stderr.setEncoding('utf8').on('data', take('stderr'));
+    if (input !== undefined) child.stdin.on('error', () => undefined).end(input);
+    const settle = (code) => {
+      running.delete(child);
+      resolve({ code, ...text });
+    };
+    child.once('error', (error) => {
+      text.stderr += error.message;
+      settle(null);
+    });
+    child.once('close', settle);
+  });
+}
+
+/** Ends every command that `run` still waits for, with the processes it started itself. */
+export function endRunning() {
+  for (const child of running) {
+    try {
+      process.kill(-child.pid, 'SIGTERM');
+    } catch {
+      child.kill('SIGTERM');
+    }
+  }
+}
+
+/** The last line with something in it: what a failed command had to say. */
+export function lastLine(text) {
+  return text.trim().split('\n').at(-1)?.trim() ?? '';
+}
