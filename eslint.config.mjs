@@ -1,5 +1,5 @@
 import tseslint from 'typescript-eslint';
-import importX from 'eslint-plugin-import-x';
+import importX, { createNodeResolver } from 'eslint-plugin-import-x';
 import reactHooks from 'eslint-plugin-react-hooks';
 
 /** Forbids imports of the named packages or folders, with the reason in the message. */
@@ -9,8 +9,8 @@ const noImports = (message, ...group) => ({
 
 /** Features of the api in the order in which they may depend on each other: later on earlier. */
 const features = [
-  'accounts',
   'workshop',
+  'accounts',
   'riders',
   'bikes',
   'chains',
@@ -45,7 +45,7 @@ export default tseslint.config(
       eqeqeq: 'error',
       'max-lines': ['error', { max: 300 }],
     },
-    settings: { 'import-x/resolver': { typescript: false, node: { extensions: ['.ts', '.tsx', '.mjs', '.js'] } } },
+    settings: { 'import-x/resolver-next': [createNodeResolver({ extensions: ['.ts', '.tsx', '.mjs', '.js'] })] },
   },
   { files: ['**/*.tsx', 'apps/web/**/*.ts'], plugins: { 'react-hooks': reactHooks }, rules: reactHooks.configs.recommended.rules },
   {
