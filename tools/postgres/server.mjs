@@ -1,7 +1,8 @@
-import { openSync, closeSync, readFileSync } from 'node:fs';
+import { closeSync } from 'node:fs';
 import { join } from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
-import { spawnBound } from '../process/bound-child.mjs';
+import { ended, spawnBound } from '../process/bound-child.mjs';
+import { openLog, stoppedSentence } from '../process/log-file.mjs';
 import { run } from '../process/run.mjs';
 import { Trouble } from '../process/trouble.mjs';
 
@@ -18,7 +19,7 @@ function launch({ dir, bin, port, identity, throwAway }) {
     ...(throwAway ? careless : {}),
   };
   const options = Object.entries(settings).flatMap(([name, value]) => ['-c', `${name}=${value}`]);
-  const log = openSync(join(dir, 'postgres.log'), 'w', 0o600);
+  const log = openLog(join(dir, 'postgres.log'));
   const child = spawnBound(join(bin, 'postgres'), ['-D', join(dir, 'postgres'), ...options], {
     deathSignal: 'INT',
     privileges: identity.privileges,
@@ -30,26 +31,20 @@ function launch({ dir, bin, port, identity, throwAway }) {
   return child;
 }
 
-function complaint(dir) {
-  const lines = readFileSync(join(dir, 'postgres.log'), 'utf8').trim().split('\n');
-  const fatal = lines.find((line) => /FATAL|ERROR|PANIC/.test(line)) ?? lines.at(-1) ?? '';
-  return fatal.replace(/^.*?(FATAL|ERROR|PANIC):\s*/, '');
-}
-
 /** Starts the server and waits until it takes connections. */
 export async function startServer(options) {
   const { dir, bin, port } = options;
   const child = launch(options);
-  let over = false;
-  child.once('exit', () => (over = true)).once('error', () => (over = true));
+  let end;
+  void ended(child).then((how) => (end = how));
   const until = Date.now() + 60_000;
-  while (!over && Date.now() < until) {
+  while (!end && Date.now() < until) {
     const { code } = await run(join(bin, 'pg_isready'), ['-q', '-h', '127.0.0.1', '-p', String(port)]);
-    if (code === 0 && !over) return child;
+    if (code === 0 && !end) return child;
     await sleep(50);
   }
+  const log = join(dir, 'postgres.log');
+  if (end) throw new Trouble(stoppedSentence('PostgreSQL', end, log));
   child.kill('SIGINT');
-  throw new Trouble(
-    `PostgreSQL did not start: ${complaint(dir) || 'see'} (log: ${join(dir, 'postgres.log')}).`,
-  );
+  throw new Trouble(`PostgreSQL did not become ready within a minute (log: ${log}).`);
 }
