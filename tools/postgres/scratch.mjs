@@ -1,6 +1,6 @@
 import { parseArgs } from 'node:util';
 import { ended } from '../process/bound-child.mjs';
-import { freePort } from '../process/ports.mjs';
+import { freePorts } from '../process/ports.mjs';
 import { Trouble } from '../process/trouble.mjs';
 import { ensurePostgres } from './binaries.mjs';
 import { startCluster } from './cluster.mjs';
@@ -10,7 +10,7 @@ async function main() {
   const { values } = parseArgs({ options: { port: { type: 'string' }, dir: { type: 'string' } } });
   if (!values.dir) throw new Trouble('Say where the data goes: --dir DIR.');
   await ensurePostgres();
-  const port = values.port ? Number(values.port) : await freePort();
+  const [port] = values.port ? [Number(values.port)] : await freePorts(0);
   const cluster = await startCluster({ dir: values.dir, port, throwAway: true });
   let asked = false;
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {

@@ -1,23 +1,34 @@
+import { once } from 'node:events';
 import { createServer } from 'node:net';
 
-function listenOnce(port) {
-  return new Promise((resolve) => {
-    const server = createServer();
-    server.once('error', () => resolve(undefined));
-    server.listen({ port, host: '127.0.0.1', exclusive: true }, () => {
-      const chosen = server.address().port;
-      server.close(() => resolve(chosen));
-    });
-  });
+const host = '127.0.0.1';
+
+/** Holds a port of the loopback address, or says nothing when it is taken or not allowed. */
+async function hold(port) {
+  const server = createServer();
+  server.listen({ port, host, exclusive: true });
+  try {
+    await once(server, 'listening');
+    return server;
+  } catch {
+    return undefined;
+  }
 }
+
+const letGo = (server) => new Promise((resolve) => server.close(resolve));
 
 /** Whether nothing listens on this port of the loopback address. */
 export async function isFree(port) {
-  return (await listenOnce(port)) !== undefined;
+  const server = await hold(port);
+  if (server) await letGo(server);
+  return server !== undefined;
 }
 
-/** The preferred port if it is free, otherwise any free one. */
-export async function freePort(preferred = 0) {
-  const wished = preferred > 0 && preferred < 65_536 ? await listenOnce(preferred) : undefined;
-  return wished ?? listenOnce(0);
+/** For each wish that port if it is free, otherwise any free one; 0 wishes for any. All differ. */
+export async function freePorts(...wishes) {
+  const servers = [];
+  for (const wish of wishes) servers.push((wish < 65_536 && (await hold(wish))) || (await hold(0)));
+  const ports = servers.map((server) => server.address().port);
+  await Promise.all(servers.map(letGo));
+  return ports;
 }

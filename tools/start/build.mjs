@@ -1,5 +1,6 @@
 import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join, relative } from 'node:path';
+import { stripVTControlCharacters } from 'node:util';
 import { lastLine, run } from '../process/run.mjs';
 import { Trouble } from '../process/trouble.mjs';
 import { sourcesHash } from './sources.mjs';
@@ -21,7 +22,7 @@ async function script(root, name, options, log) {
     log,
   });
   if (code === 0) return;
-  const output = `${stdout}\n${stderr}`;
+  const output = stripVTControlCharacters(`${stdout}\n${stderr}`);
   const complaint = output.split('\n').find((line) => /error/i.test(line)) ?? lastLine(output);
   throw new Trouble(`The build failed in "${name}": ${complaint.trim()} (all of it in ${log}).`);
 }

@@ -1,4 +1,4 @@
-import { existsSync, writeFileSync } from 'node:fs';
+import { existsSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { startCluster } from '../postgres/cluster.mjs';
 import { ended } from '../process/bound-child.mjs';
@@ -31,13 +31,14 @@ async function program({ cli, name, args = [], env, dir, onLine }) {
 
 export const migrate = (context) => program({ ...context, name: 'migrate' });
 
-/** Loads the demo once per data folder. */
-export async function loadDemo(context) {
+/** Loads the demo into a new cluster, or into one whose first start was interrupted before it was loaded. */
+export async function loadDemo({ isNew, ...context }) {
   const done = join(context.dir, 'demo-loaded');
-  if (existsSync(done)) return false;
+  if (!isNew && existsSync(done)) return 'there already';
+  rmSync(done, { force: true });
   await program({ ...context, name: 'demo' });
   writeFileSync(done, '');
-  return true;
+  return 'loaded';
 }
 
 /** The demo's sign-ins: `[{ email, password, role, … }]`. */

@@ -39,9 +39,7 @@ export async function runProduct({
   const owner = { ...base, DATABASE_URL: database.urls.app, DATABASE_OWNER_URL: database.urls.owner };
   const tools = { cli: join(api, 'cli'), dir, env: owner };
   await stage('Database structure', async () => void (await migrate(tools)));
-  await stage('Demo', async (progress) =>
-    (await loadDemo({ ...tools, onLine: progress })) ? 'loaded' : 'there already',
-  );
+  await stage('Demo', (progress) => loadDemo({ ...tools, isNew: database.isNew, onLine: progress }));
   await stage('Mail', () =>
     startService({
       name: 'The mail server',
@@ -50,7 +48,7 @@ export async function runProduct({
         ...process.env,
         SMTP_PORT: ports.smtp,
         MAILBOX_PORT: ports.mailbox,
-        MAILBOX_DIR: join(dir, 'mailbox'),
+        MAILBOX_DIR: throwAway ? undefined : join(dir, 'mailbox'),
       },
       log: join(logs, 'mail.log'),
       readyUrl: `${mailboxUrl}/api/behaviour`,

@@ -1,7 +1,7 @@
 import { randomBytes } from 'node:crypto';
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { join, resolve } from 'node:path';
-import { freePort, isFree } from '../process/ports.mjs';
+import { freePorts, isFree } from '../process/ports.mjs';
 import { Trouble } from '../process/trouble.mjs';
 
 /** Where to listen and where to keep things, from PORT and DATA_DIR. */
@@ -20,11 +20,7 @@ export async function choosePorts(port) {
       `Port ${port} is taken or not allowed: stop what uses it, or choose another, for example PORT=${port < 65_500 ? port + 10 : 4190} npm start.`,
     );
   }
-  const [mailbox, smtp, postgres] = [
-    await freePort(port + 1),
-    await freePort(port + 2),
-    await freePort(port + 3),
-  ];
+  const [mailbox, smtp, postgres] = await freePorts(port + 1, port + 2, port + 3);
   return { http: port, mailbox, smtp, postgres };
 }
 
