@@ -18,12 +18,15 @@ export const bike = bikeInput.extend({
   fittedChainId: id.nullable(),
 });
 export type Bike = z.infer<typeof bike>;
+export type NewBike = z.infer<typeof newBike>;
 export type BikeInput = z.infer<typeof bikeInput>;
 export const bikePage = pageOf(bike);
 export const bikeQuery = pageQuery.extend({ riderId: id.optional() });
+export type BikeQuery = z.infer<typeof bikeQuery>;
 
-/** GET, POST /api/bikes/:id/odometer */
+/** GET, POST /api/bikes/:id/odometer, DELETE …/odometer/:readingId; given twice for a day, the later figure holds. */
 export const odometerInput = z.object({ day, odometerM: metres('The odometer', 200_000) });
+export type OdometerInput = z.infer<typeof odometerInput>;
 export const odometerReading = odometerInput.extend({ id, bikeId: id });
 export type OdometerReading = z.infer<typeof odometerReading>;
 export const odometerPage = pageOf(odometerReading);

@@ -18,6 +18,9 @@ export const chainInput = z.object({
 /** POST /api/chains: with bikeId it is fitted at once. */
 export const newChain = chainInput.extend({ riderId: id, bikeId: id.nullable() });
 
+export type ChainInput = z.infer<typeof chainInput>;
+export type NewChain = z.infer<typeof newChain>;
+
 export const chain = chainInput.extend({
   id,
   riderId: id,
@@ -45,11 +48,28 @@ export type ChainQuery = z.infer<typeof chainQuery>;
 
 /** POST /api/chains/:id/fit: puts it on a bike from that day; the chain on it goes into the box. */
 export const fitChain = z.object({ bikeId: id, day });
-/** POST /api/chains/:id/box */
+/** POST /api/chains/:id/box: that day was its last on the bike. */
 export const boxChain = z.object({ day });
-/** POST /api/chains/:id/retire */
+/** POST /api/chains/:id/retire; POST /api/chains/:id/return (no body) takes it back. */
 export const retireChain = z.object({ day, because: z.enum(retiredReasons) });
 /** GET /api/chains/:id/fittings */
-export const fitting = z.object({ id, bikeId: id, bikeName: z.string(), from: day, to: day.nullable() });
+export const fitting = z.object({
+  id,
+  chainId: id,
+  bikeId: id,
+  bikeName: z.string(),
+  from: day,
+  to: day.nullable(),
+});
 export type Fitting = z.infer<typeof fitting>;
 export const fittingPage = pageOf(fitting);
+/** PUT /api/fittings/:id corrects one; rides follow it to the chain that was on the bike that day. */
+export const fittingInput = z
+  .object({ bikeId: id, from: day, to: day.nullable() })
+  .refine((f) => f.to === null || f.from <= f.to, {
+    message: 'The last day is before the first.',
+    path: ['to'],
+  });
+export type FittingInput = z.infer<typeof fittingInput>;
+export type FitChain = z.infer<typeof fitChain>;
+export type RetireChain = z.infer<typeof retireChain>;

@@ -7,32 +7,45 @@ const elongation = z
   .min(-0.3, 'A chain that reads shorter than −0.3 % was measured wrongly: measure again under tension.')
   .max(3, 'Over 3 % no chain would still run: check the figure.');
 
+const measurementShape = z.object({
+  method: z.enum(readingMethods),
+  values: z.array(elongation).min(1).max(5).nullable(),
+  /** The step that goes in: elongation is above it. */
+  lower: elongation.nullable(),
+  /** The step that does not go in: elongation is below it. */
+  upper: elongation.nullable(),
+});
+type Measurement = z.infer<typeof measurementShape>;
+
+/** What must hold of any measurement, as [condition that is wrong, field, sentence]. */
+const measurementRules = ({ method, values, lower, upper }: Measurement): [boolean, string, string][] => [
+  [values === null && lower === null && upper === null, 'values', 'Enter what the tool shows.'],
+  [
+    values !== null && (lower !== null || upper !== null),
+    'values',
+    'Enter either a figure or what goes and does not go.',
+  ],
+  [
+    method === 'drop-in' && values !== null,
+    'values',
+    'A drop-in gauge shows what goes in and what does not, not a figure.',
+  ],
+  [
+    lower !== null && upper !== null && lower >= upper,
+    'upper',
+    'The step that does not go in must be larger than the one that goes.',
+  ],
+];
+const holdToRules = (measured: Measurement, context: z.RefinementCtx) => {
+  for (const [wrong, field, message] of measurementRules(measured))
+    if (wrong) context.addIssue({ code: 'custom', path: [field], message });
+};
+
 /** A number reading has 1 to 5 places (% elongation); a go/no-go reading has what goes and what does not. */
-export const readingInput = z
-  .object({
-    chainId: id,
-    day,
-    method: z.enum(readingMethods),
-    values: z.array(elongation).min(1).max(5).nullable(),
-    /** The step that goes in: elongation is above it. */
-    lower: elongation.nullable(),
-    /** The step that does not go in: elongation is below it. */
-    upper: elongation.nullable(),
-    baseline: z.boolean().default(false),
-    notes: notes.default(''),
-  })
-  .refine((r) => r.values !== null || r.lower !== null || r.upper !== null, {
-    message: 'Enter what the tool shows.',
-    path: ['values'],
-  })
-  .refine((r) => r.values === null || (r.lower === null && r.upper === null), {
-    message: 'Enter either a figure or what goes and does not go.',
-    path: ['values'],
-  })
-  .refine((r) => r.lower === null || r.upper === null || r.lower < r.upper, {
-    message: 'The step that does not go in must be larger than the one that goes.',
-    path: ['upper'],
-  });
+export const measurement = measurementShape.superRefine(holdToRules);
+export const readingInput = measurementShape
+  .extend({ chainId: id, day, baseline: z.boolean().default(false), notes: notes.default('') })
+  .superRefine(holdToRules);
 export type ReadingInput = z.infer<typeof readingInput>;
 export const reading = z.object({
   id,
@@ -49,3 +62,4 @@ export const reading = z.object({
 export type Reading = z.infer<typeof reading>;
 export const readingPage = pageOf(reading);
 export const readingQuery = pageQuery.extend({ chainId: id });
+export type ReadingQuery = z.infer<typeof readingQuery>;

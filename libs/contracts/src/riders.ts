@@ -23,6 +23,17 @@ export const rider = z.object({
   chains: z.number().int(),
 });
 export type Rider = z.infer<typeof rider>;
+/** PUT /api/riders/:id/reminders: turns the letters to a rider on or off. */
+export const reminderSwitch = z.object({ on: z.boolean() });
+/** GET /api/riders/me: what a rider sees of themself; the workshop's notes are its own. */
+export const riderSelf = rider.omit({ notes: true });
+export type RiderSelf = z.infer<typeof riderSelf>;
+/** PUT /api/riders/me */
+export const riderSelfInput = riderInput
+  .omit({ notes: true })
+  .extend({ distanceUnit, remindersOn: z.boolean() });
+export type RiderInput = z.infer<typeof riderInput>;
+export type RiderSelfInput = z.infer<typeof riderSelfInput>;
 export const riderPage = pageOf(rider);
 export const riderQuery = pageQuery.extend({ search: z.string().trim().max(100).default('') });
 export type RiderQuery = z.infer<typeof riderQuery>;

@@ -36,16 +36,38 @@ export const rideQuery = pageQuery.extend({
 });
 export type RideQuery = z.infer<typeof rideQuery>;
 
-/** GET /api/rides/by-day?chainId=…|bikeId=…: sums for charts, metres by day. */
+/** GET /api/rides/by-day?chainId=…|bikeId=…: sums for charts, metres by day, of at most three years. */
 export const ridingDay = z.object({ day, distanceM: z.number(), lubeM: z.number(), wearM: z.number() });
+export type RidingDay = z.infer<typeof ridingDay>;
+export const ridingDays = z.object({ from: day, to: day, days: z.array(ridingDay) });
+export type RidingDays = z.infer<typeof ridingDays>;
+export const ridingDayQuery = z
+  .object({ bikeId: id.optional(), chainId: id.optional(), from: day.optional(), to: day.optional() })
+  .refine((q) => (q.bikeId === undefined) !== (q.chainId === undefined), {
+    message: 'Name either a bike or a chain.',
+    path: ['bikeId'],
+  });
+export type RidingDayQuery = z.infer<typeof ridingDayQuery>;
 
-/** POST /api/imports (multipart: file, bikeId or chainId, surface and weather for what the file does not say) */
-export const importTarget = z.object({
-  bikeId: id,
-  surface: z.enum(surfaces).default('road'),
-  weather: z.enum(weathers).default('unknown'),
-});
-/** GET /api/imports/:id, polled while it runs. */
+/** The largest file that POST /api/imports takes. */
+export const MAX_IMPORT_BYTES = 20 * 1024 * 1024;
+/**
+ * POST /api/imports (multipart: file, bikeId or chainId, surface and weather for what the file does not say).
+ * A chain stands for the bike it is on.
+ */
+export const importTarget = z
+  .object({
+    bikeId: id.optional(),
+    chainId: id.optional(),
+    surface: z.enum(surfaces).default('road'),
+    weather: z.enum(weathers).default('unknown'),
+  })
+  .refine((q) => (q.bikeId === undefined) !== (q.chainId === undefined), {
+    message: 'Name either a bike or a chain.',
+    path: ['bikeId'],
+  });
+export type ImportTarget = z.infer<typeof importTarget>;
+/** POST /api/imports, and GET /api/imports/:id, polled while it runs. */
 export const rideImport = z.object({
   id,
   fileName: z.string(),
@@ -54,8 +76,8 @@ export const rideImport = z.object({
   added: z.number().int(),
   alreadyThere: z.number().int(),
   refused: z.number().int(),
-  /** What was wrong, line by line, at most the first 50. */
-  problems: z.array(z.object({ line: z.number().int(), message: z.string() })),
+  /** What was wrong, line by line (null where the file has no lines), at most the first 50. */
+  problems: z.array(z.object({ line: z.number().int().nullable(), message: z.string() })),
   message: z.string(),
 });
 export type RideImport = z.infer<typeof rideImport>;
