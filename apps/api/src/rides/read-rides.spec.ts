@@ -6,7 +6,7 @@ describe('a file on its way in', () => {
   it('gives rides with keys, and problems with their lines', async () => {
     const { rides, problems } = await read(
       'log.csv',
-      'date,distance_km\n2026-05-01,12.5\n2026-05-01,12.5\n2027-01-01,3\n1970-05-01,3\nyesterday,4\n',
+      'date,distance_km\n2026-05-01,12.5\n2026-05-01,12.5\n2027-01-01,3\n1970-05-01,3\n2026-05-02,far\n',
     );
     expect(rides.map(({ date, distanceM, format }) => [date, distanceM, format])).toEqual([
       ['2026-05-01', 12_500, 'csv'],
