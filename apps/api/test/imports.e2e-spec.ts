@@ -1,0 +1,175 @@
+import type { Bike, Chain, Rider, RideImport } from '@halfpitch/contracts';
+import { gzipSync } from 'node:zlib';
+import { ImportBatch } from '../src/rides/import-batch';
+import { BootedApp, bootApp, ownerOfNewWorkshop } from './support/app';
+import { Browser, daysAgo, joined, newBike, newChain, newRide, newRider } from './support/scene';
+
+let booted: BootedApp;
+let owner: Browser;
+let stranger: Browser;
+let rider: Rider;
+let browser: Browser;
+let bike: Bike;
+let chain: Chain;
+
+beforeAll(async () => {
+  booted = await bootApp();
+  ({ browser: owner } = await ownerOfNewWorkshop(booted, 'North Wheel'));
+  ({ browser: stranger } = await ownerOfNewWorkshop(booted, 'South Wheel'));
+  rider = await newRider(owner, 'Rita Rider');
+  browser = await joined(booted, owner, rider);
+});
+beforeEach(async () => {
+  bike = await newBike(browser, rider.id);
+  chain = await newChain(browser, bike, { inServiceOn: daysAgo(3000) });
+});
+afterEach(() => jest.restoreAllMocks());
+afterAll(() => booted.close());
+
+/** A log of so many rides, one a day, every distance another. */
+function log(rides: number): string {
+  const lines = Array.from({ length: rides }, (_, i) => `${daysAgo(rides - i)},${(5 + i / 100).toFixed(2)},`);
+  return ['date,distance_km,indoor', ...lines, ''].join('\n');
+}
+
+const send = (file: string | Buffer, name: string, fields: Record<string, string> = { bikeId: bike.id }) =>
+  browser.post('/api/imports').field(fields).attach('file', Buffer.from(file), name);
+
+async function finished(id: string): Promise<RideImport> {
+  for (let i = 0; i < 200; i++) {
+    const { body } = await browser.get(`/api/imports/${id}`).expect(200);
+    if (body.state === 'done' || body.state === 'failed') return body;
+    await new Promise((resolve) => setTimeout(resolve, 50));
+  }
+  throw new Error('The import did not end.');
+}
+async function imported(
+  file: string | Buffer,
+  name: string,
+  fields?: Record<string, string>,
+): Promise<RideImport> {
+  const { body } = await send(file, name, fields).expect(202);
+  expect(body).toMatchObject({ state: 'waiting', fileName: name });
+  return finished(body.id);
+}
+const rides = async () => (await browser.get('/api/rides').query({ bikeId: bike.id, size: 200 })).body;
+
+describe('a log of rides', () => {
+  it('is taken in whole, and again without doubling anything', async () => {
+    const file = log(450);
+    const once = { state: 'done', total: 450, added: 450, alreadyThere: 0, refused: 0, problems: [] };
+    expect(await imported(file, 'log.csv')).toMatchObject(once);
+    expect(await imported(file, 'log again.csv', { chainId: chain.id })).toMatchObject({
+      added: 0,
+      alreadyThere: 450,
+    });
+    const { total, items } = await rides();
+    expect(total).toBe(450);
+    expect(items[0]).toMatchObject({
+      day: daysAgo(1),
+      distanceM: 9490,
+      source: 'csv',
+      chainId: chain.id,
+      weather: 'unknown',
+    });
+  });
+
+  it('goes on after a crash where it stopped, and counts right', async () => {
+    const keep = ImportBatch.prototype.keep;
+    let calls = 0;
+    jest.spyOn(ImportBatch.prototype, 'keep').mockImplementation(function (this: ImportBatch, ...batch) {
+      if (++calls === 2) throw new Error('pulled the plug');
+      return keep.apply(this, batch);
+    });
+    const end = await imported(log(450), 'crash.csv');
+    expect(end).toMatchObject({ state: 'done', added: 450, alreadyThere: 0 });
+    expect(calls).toBe(4);
+    expect((await rides()).total).toBe(450);
+  }, 30_000);
+
+  it('tells line by line what was wrong, and keeps the rest', async () => {
+    const file = `date,distance_km\n${daysAgo(5)},10\n${daysAgo(4)},far\n${daysAgo(-9)},11\n${daysAgo(3)},12\n`;
+    const end = await imported(file, 'part.csv');
+    expect(end).toMatchObject({ state: 'done', total: 4, added: 2, refused: 2 });
+    expect(end.problems.map(({ line }) => line)).toEqual([3, 4]);
+  });
+
+  it('takes surface and weather from the file, else as told', async () => {
+    const file = `date,distance_km,indoor\n${daysAgo(3)},12,1\n${daysAgo(2)},12,0\n`;
+    await imported(file, 'mixed.csv', { bikeId: bike.id, surface: 'gravel', weather: 'damp' });
+    expect((await rides()).items).toMatchObject([
+      { surface: 'gravel', weather: 'damp' },
+      { surface: 'indoor', weather: 'dry' },
+    ]);
+  });
+});
+
+/** Points every minute along a meridian, `stepM` apart. */
+function gpx(start: Date, minutes: number, stepM: number): string {
+  const points = Array.from({ length: minutes + 1 }, (_, i) => {
+    const lat = 48 + (i * stepM) / 111_195;
+    return `<trkpt lat="${lat.toFixed(7)}" lon="9"><time>${new Date(start.getTime() + i * 60_000).toISOString()}</time></trkpt>`;
+  });
+  return `<?xml version="1.0"?><gpx version="1.1" creator="spec" xmlns="http://www.topografix.com/GPX/1/1">
+    <trk><type>cycling</type><trkseg>${points.join('')}</trkseg></trk></gpx>`;
+}
+
+describe('the same ride', () => {
+  const start = new Date(`${daysAgo(6)}T08:00:00Z`);
+
+  it('from a second device is already there', async () => {
+    expect(await imported(gpx(start, 60, 300), 'one.gpx')).toMatchObject({ added: 1 });
+    const second = gpx(new Date(start.getTime() + 90_000), 58, 305);
+    expect(await imported(gzipSync(second), 'two.gpx.gz')).toMatchObject({ added: 0, alreadyThere: 1 });
+    const later = gpx(new Date(start.getTime() + 5 * 3_600_000), 60, 300);
+    expect(await imported(later, 'later.gpx')).toMatchObject({ added: 1 });
+    expect((await rides()).items[0]).toMatchObject({ source: 'gpx', startedAt: expect.any(String) });
+  });
+
+  it('typed in before is already there', async () => {
+    await newRide(browser, bike.id, { day: daysAgo(6), distanceM: 18_010 });
+    expect(await imported(gpx(start, 60, 300), 'typed.gpx')).toMatchObject({ added: 0, alreadyThere: 1 });
+  });
+});
+
+describe('what cannot be taken in', () => {
+  it.each([
+    ['empty.csv', ''],
+    ['picture.png', Buffer.from([0x89, 0x50, 0x4e, 0x47, 0, 1, 2, 3])],
+    ['page.html', '<html><body>Hello</body></html>'],
+    ['broken.gpx', '<gpx><trk><trkseg><trkpt lat="1"'],
+  ])('is told in a sentence: %s', async (name, file) => {
+    const end = await imported(file, name);
+    expect(end).toMatchObject({ state: 'failed', added: 0 });
+    expect(end.message).toMatch(/^[A-Z“].+[.]$/);
+  });
+
+  it('is refused before anything is kept: too large, no file, two targets, a chain in the box', async () => {
+    expect((await send(Buffer.alloc(20 * 1024 * 1024 + 1), 'big.fit').expect(413)).body.detail).toContain(
+      '20 MB',
+    );
+    await browser.post('/api/imports').field({ bikeId: bike.id }).expect(422);
+    await send('x', 'x.csv', { bikeId: bike.id, chainId: chain.id }).expect(400);
+    await send('x', 'x.csv', {}).expect(400);
+    await browser
+      .post(`/api/chains/${chain.id}/box`)
+      .send({ day: daysAgo(0) })
+      .expect(200);
+    expect((await send('x', 'x.csv', { chainId: chain.id }).expect(422)).body.detail).toContain(
+      'fit it first',
+    );
+  });
+
+  it('is anything for a bike of another workshop, or from who is not signed in', async () => {
+    const mine = await send(log(3), 'mine.csv').expect(202);
+    const attempt = (who: Browser) =>
+      who
+        .post('/api/imports')
+        .field({ bikeId: bike.id })
+        .attach('file', Buffer.from(log(1)), 'log.csv');
+    await attempt(stranger).expect(404);
+    await attempt(booted.browser()).expect(401);
+    await stranger.get(`/api/imports/${mine.body.id}`).expect(404);
+    await owner.get(`/api/imports/${mine.body.id}`).expect(200);
+  });
+});
