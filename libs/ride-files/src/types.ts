@@ -30,10 +30,12 @@ export interface RideFileResult {
   file: string;
   format: FileFormat | null;
   outcome: Outcome;
-  /** The recording, also of another sport (so that a rider may say it was a ride); null when there is none. */
+  /** The recording; also one of another sport (a rider may say it was a ride) or one that never moves. Null when there is none. */
   ride: FileRide | null;
   /** Plain sentence: what was found, or what is wrong and what to do. */
   message: string;
+  /** Metres of a track without times, which the rider may log by hand. */
+  untimedM?: number;
   /** Line of a CSV, counted from 1. */
   line?: number;
   /** True when the CSV needs its columns matched first: show inspectCsv, then use readCsv. */

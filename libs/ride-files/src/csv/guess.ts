@@ -3,7 +3,8 @@ import type { CsvMatching, CsvQuestion, DateOrder, Delimiter } from './matching'
 import type { CsvRow } from './table';
 import { parseDay, parseNumber } from './values';
 
-const looksLikeDate = (text: string) =>
+/** A day in one order or another. */
+export const looksLikeDate = (text: string) =>
   parseDay(text, 'ymd') !== null || parseDay(text, 'dmy') !== null || parseDay(text, 'mdy') !== null;
 
 const looksLikeNumber = (text: string) => parseNumber(text, '.') !== null || parseNumber(text, ',') !== null;
@@ -14,10 +15,10 @@ export function guessHeader(rows: CsvRow[]): boolean {
   return !first.some((cell) => looksLikeDate(cell) || looksLikeNumber(cell));
 }
 
-/** Date orders under which every filled cell is a day; a cell with 13 or more decides. */
+/** Date orders under which the most cells are days; a cell with 13 or more decides, a year first asks nothing. */
 export function possibleOrders(cells: string[]): DateOrder[] {
   const orders: DateOrder[] = ['ymd', 'dmy', 'mdy'];
-  const filled = cells.filter((cell) => cell !== '');
+  const filled = cells.filter(looksLikeDate);
   const fits = (order: DateOrder) => filled.filter((cell) => parseDay(cell, order) !== null).length;
   if (filled.every((cell) => /^\d{4}/.test(cell))) return ['ymd'];
   const most = Math.max(...orders.map(fits));
@@ -31,8 +32,7 @@ export function guessDecimal(cells: string[]): { decimal: '.' | ','; sure: boole
   const comma = reads(',');
   const point = reads('.');
   if (comma !== point) return { decimal: comma > point ? ',' : '.', sure: true };
-  const thousandths = cells.some((cell) => /^\d{1,3},\d{3}$/.test(cell));
-  return { decimal: '.', sure: !thousandths };
+  return { decimal: '.', sure: !cells.some((cell) => /^\d{1,3},\d{3}$/.test(cell)) };
 }
 
 const unitless = (cell: string) => cell.replace(/\s*(km|mi|m)$/i, '');

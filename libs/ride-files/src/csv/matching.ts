@@ -1,4 +1,4 @@
-import type { FileRide } from '../types';
+import type { FileRide, Outcome } from '../types';
 
 export type CsvField =
   | 'date'
@@ -38,6 +38,8 @@ export interface CsvQuestion {
 export interface CsvProblem {
   /** Line of the file, counted from 1. */
   line: number;
+  /** 'unreadable', or 'not-a-ride' and 'other-sport' for rows that were rightly left out. */
+  outcome: Exclude<Outcome, 'ride'>;
   message: string;
 }
 

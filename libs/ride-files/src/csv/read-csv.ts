@@ -1,33 +1,52 @@
+import { guessDelimiter } from './delimiter';
 import { guessMatching } from './guess';
-import type { CsvInspection, CsvMatching, CsvReading } from './matching';
+import type { CsvInspection, CsvMatching, CsvQuestion, CsvReading } from './matching';
 import { readRow } from './read-row';
-import { csvText, guessDelimiter, MAX_CSV_ROWS, splitRows, type CsvRow } from './table';
+import { csvText, MAX_CSV_ROWS, splitRows, type CsvRow } from './table';
 import { UnreadableFile } from '../unreadable';
 
 const PREVIEW_ROWS = 8;
 
-/**
- * Looks at a CSV without saving anything: guessed matching, what must be asked, a preview and the problems.
- * @throws UnreadableFile with a plain sentence
- */
-export function inspectCsv(bytes: Uint8Array): CsvInspection {
+/** A CSV read once, with the guess or the matching given. */
+export interface ExaminedCsv extends CsvReading {
+  matching: CsvMatching;
+  questions: CsvQuestion[];
+  header: string[];
+  body: CsvRow[];
+}
+
+/** Reads a CSV; throws UnreadableFile with a plain sentence when it holds no table. */
+export function examineCsv(bytes: Uint8Array, given?: CsvMatching): ExaminedCsv {
   const text = csvText(bytes);
-  const delimiter = guessDelimiter(text);
-  const rows = limited(splitRows(text, delimiter));
-  const { matching, questions } = guessMatching(rows, delimiter);
+  const delimiter = given?.delimiter ?? guessDelimiter(text);
+  const rows = splitRows(text, delimiter);
+  if (rows.length > MAX_CSV_ROWS) {
+    throw new UnreadableFile(`The table has more than ${MAX_CSV_ROWS} rows: cut it into smaller files.`);
+  }
+  const { matching, questions } = given ? { matching: given, questions: [] } : guessMatching(rows, delimiter);
+  const header = matching.hasHeader ? (rows[0]?.cells ?? []) : [];
   const body = matching.hasHeader ? rows.slice(1) : rows;
   if (body.length === 0)
     throw new UnreadableFile('The file holds no rows: export it again with at least one ride.');
-  const { rides, problems } = readRows(body, matching);
+  return { matching, questions, header, body, ...readRows(body, matching) };
+}
+
+/**
+ * Looks at a CSV without saving anything: guessed matching, what must be asked, a preview and the problems.
+ * Given a matching, it shows what that would make of the file.
+ * @throws UnreadableFile with a plain sentence
+ */
+export function inspectCsv(bytes: Uint8Array, given?: CsvMatching): CsvInspection {
+  const { matching, questions, header, body, rides, problems } = examineCsv(bytes, given);
   const preview = body.slice(0, PREVIEW_ROWS);
   const last = preview.at(-1)?.line ?? 0;
-  const width = Math.max(...rows.slice(0, 50).map((row) => row.cells.length));
+  const width = Math.max(header.length, ...body.slice(0, 50).map((row) => row.cells.length));
   return {
     matching,
     questions,
     columns: Array.from({ length: width }, (_, index) => ({
       index,
-      header: matching.hasHeader ? (rows[0]?.cells[index] ?? '') : `Column ${index + 1}`,
+      header: header[index] || `Column ${index + 1}`,
       samples: preview.map((row) => row.cells[index] ?? ''),
     })),
     preview,
@@ -43,26 +62,16 @@ export function inspectCsv(bytes: Uint8Array): CsvInspection {
  * @throws UnreadableFile with a plain sentence
  */
 export function readCsv(bytes: Uint8Array, matching?: CsvMatching): CsvReading {
-  const text = csvText(bytes);
-  const delimiter = matching?.delimiter ?? guessDelimiter(text);
-  const rows = limited(splitRows(text, delimiter));
-  const chosen = matching ?? guessMatching(rows, delimiter).matching;
-  return readRows(chosen.hasHeader ? rows.slice(1) : rows, chosen);
+  const { rides, problems } = examineCsv(bytes, matching);
+  return { rides, problems };
 }
 
 function readRows(rows: CsvRow[], matching: CsvMatching): CsvReading {
   const reading: CsvReading = { rides: [], problems: [] };
   for (const row of rows) {
     const ride = readRow(row, matching);
-    if (typeof ride === 'string') reading.problems.push({ line: row.line, message: ride });
+    if ('message' in ride) reading.problems.push(ride);
     else reading.rides.push(ride);
   }
   return reading;
-}
-
-function limited(rows: CsvRow[]): CsvRow[] {
-  if (rows.length > MAX_CSV_ROWS) {
-    throw new UnreadableFile(`The table has more than ${MAX_CSV_ROWS} rows: cut it into smaller files.`);
-  }
-  return rows;
 }

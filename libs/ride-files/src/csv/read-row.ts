@@ -1,29 +1,38 @@
 import { startInstant } from './start';
-import type { CsvField, CsvMatching, CsvRide } from './matching';
+import type { CsvField, CsvMatching, CsvProblem, CsvRide } from './matching';
 import { parseDay, parseDistance, parseDuration } from './values';
 import { surfaceOf, weatherOf, yesOrNo } from './words';
 import type { CsvRow } from './table';
+import { isCycling, isIndoor } from '../sport';
 
 /** Longer than anyone rides in a day: a slipped unit or a running total, not a ride (common practice, no source). */
 const MAX_RIDE_M = 2_000_000;
 
-/** One row as a ride, or the plain sentence that says why it is none. */
-export function readRow(row: CsvRow, matching: CsvMatching): CsvRide | string {
+/** One row as a ride, or the problem that says why it is none. */
+export function readRow(row: CsvRow, matching: CsvMatching): CsvRide | CsvProblem {
+  const problem = (message: string, outcome: CsvProblem['outcome'] = 'unreadable') => ({
+    line: row.line,
+    outcome,
+    message,
+  });
   const cell = (field: CsvField) => row.cells[matching.columns[field] ?? -1] ?? '';
   const date = parseDay(cell('date'), matching.dateOrder);
-  if (date === null) return `“${shorten(cell('date'))}” is not a date in the order chosen.`;
+  if (date === null) return problem(`“${shorten(cell('date'))}” is not a date in the order chosen.`);
   const distance = parseDistance(cell('distance'), matching.distanceUnit, matching.decimal);
-  if (distance === null) return `“${shorten(cell('distance'))}” is not a distance.`;
+  if (distance === null) return problem(`“${shorten(cell('distance'))}” is not a distance.`);
   const distanceM = Math.round(distance);
-  if (distanceM <= 0) return 'The distance is nothing: the row was left out.';
+  if (distanceM <= 0) return problem('The distance is nothing: the row was left out.', 'not-a-ride');
   if (distanceM > MAX_RIDE_M)
-    return `${Math.round(distanceM / 1000)} km is too far for one ride: check the unit.`;
+    return problem(`${Math.round(distanceM / 1000)} km is too far for one ride: check the unit.`);
+  const sport = cell('sport') || null;
+  if (isCycling(sport) === false)
+    return problem(`“${shorten(cell('sport'))}” is another sport: the row was left out.`, 'other-sport');
   const movingS = duration(cell('movingTime'), matching);
   const elapsedS = duration(cell('elapsedTime'), matching);
   if (movingS === undefined || elapsedS === undefined)
-    return 'The time cannot be read: use hours:minutes:seconds.';
+    return problem('The time cannot be read: use hours:minutes:seconds.');
   const surface = surfaceOf(cell('surface'));
-  const indoor = yesOrNo(cell('indoor')) ?? (surface === 'indoor' ? true : null);
+  const indoor = yesOrNo(cell('indoor')) ?? (surface === 'indoor' ? true : isIndoor(sport));
   return {
     line: row.line,
     date,
@@ -31,7 +40,7 @@ export function readRow(row: CsvRow, matching: CsvMatching): CsvRide | string {
     distanceM,
     movingS,
     elapsedS,
-    sport: cell('sport') || null,
+    sport,
     indoor,
     surface: surface ?? (indoor ? 'indoor' : null),
     weather: weatherOf(cell('weather')),

@@ -10,7 +10,6 @@ export interface CsvRow {
 
 export const MAX_CSV_ROWS = 200_000;
 const MAX_ROW_CHARS = 20_000;
-const delimiters: Delimiter[] = [',', ';', '\t', '|'];
 
 /** Splits text into rows; throws UnreadableFile with a plain sentence when it cannot. */
 export function splitRows(text: string, delimiter: Delimiter, limit = MAX_CSV_ROWS + 1): CsvRow[] {
@@ -45,31 +44,4 @@ export function csvText(bytes: Uint8Array): string {
     );
   }
   return text;
-}
-
-/** The delimiter that cuts the first rows into the most columns, the same number on nearly every row. */
-export function guessDelimiter(text: string): Delimiter {
-  const head = text.slice(0, 65_536);
-  const sample = text.length > head.length ? head.slice(0, head.lastIndexOf('\n') + 1) || head : head;
-  let best: Delimiter = ',';
-  let bestScore = 0;
-  for (const delimiter of delimiters) {
-    const score = evenness(sample, delimiter);
-    if (score > bestScore) [best, bestScore] = [delimiter, score];
-  }
-  return best;
-}
-
-/** Columns of the header times the share of rows that have as many: 0 when there is one column only. */
-function evenness(sample: string, delimiter: Delimiter): number {
-  let rows: CsvRow[];
-  try {
-    rows = splitRows(sample, delimiter, 50);
-  } catch {
-    return 0;
-  }
-  const width = rows[0]?.cells.length ?? 0;
-  if (width < 2) return 0;
-  const even = rows.filter((row) => row.cells.length === width).length / rows.length;
-  return even >= 0.8 ? width * even : even;
 }
