@@ -1,5 +1,6 @@
 import type { Bike, Chain, Rider, RideImport } from '@halfpitch/contracts';
 import { gzipSync } from 'node:zlib';
+import { DataSource } from 'typeorm';
 import { ImportBatch } from '../src/rides/import-batch';
 import { BootedApp, bootApp, ownerOfNewWorkshop } from './support/app';
 import { Browser, daysAgo, joined, newBike, newChain, newRide, newRider } from './support/scene';
@@ -81,11 +82,13 @@ describe('a log of rides', () => {
       if (++calls === 2) throw new Error('pulled the plug');
       return keep.apply(this, batch);
     });
-    const end = await imported(log(450), 'crash.csv');
+    const { body } = await send(log(450), 'crash.csv').expect(202);
+    await retryAtOnce();
+    const end = await finished(body.id);
     expect(end).toMatchObject({ state: 'done', added: 450, alreadyThere: 0 });
     expect(calls).toBe(4);
     expect((await rides()).total).toBe(450);
-  }, 30_000);
+  });
 
   it('tells line by line what was wrong, and keeps the rest', async () => {
     const file = `date,distance_km\n${daysAgo(5)},10\n${daysAgo(4)},far\n${daysAgo(-9)},11\n${daysAgo(3)},12\n`;
@@ -103,6 +106,19 @@ describe('a log of rides', () => {
     ]);
   });
 });
+
+/** Spares the pause that the queue makes before it tries again. */
+async function retryAtOnce(): Promise<void> {
+  const database = booted.app.get(DataSource);
+  for (let i = 0; i < 100; i++) {
+    const [, tried] = await database.query(
+      `update pgboss.job set start_after = now() where name = 'import-rides' and state = 'retry'`,
+    );
+    if (tried > 0) return;
+    await new Promise((resolve) => setTimeout(resolve, 50));
+  }
+  throw new Error('Nothing waits to be tried again.');
+}
 
 /** Points every minute along a meridian, `stepM` apart. */
 function gpx(start: Date, minutes: number, stepM: number): string {
