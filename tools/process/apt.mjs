@@ -1,3 +1,4 @@
+import { existsSync } from 'node:fs';
 import { userInfo } from 'node:os';
 import { run } from './run.mjs';
 import { Trouble } from './trouble.mjs';
@@ -14,17 +15,23 @@ async function aptGet(args, log) {
   return run('sudo', [...ask, 'env', ...settings, 'apt-get', ...options], { log, ...stdio });
 }
 
+const telling = /^(E:|sudo:)/;
+
 /** Installs packages of Debian, or says in one sentence why it could not. */
 export async function installDebianPackages(names, { log } = {}) {
   const list = names.join(' ');
-  const byHand = `install by hand with: ${isRoot() ? '' : 'sudo '}apt-get install ${list}`;
+  if (!isRoot() && !existsSync('/usr/bin/sudo')) {
+    throw new Trouble(
+      `Halfpitch needs Debian's ${list}, and without sudo only root can install it: as root, apt-get install ${list}.`,
+    );
+  }
   const update = await aptGet(['update'], log);
   const install = await aptGet(['install', '--no-install-recommends', ...names], log);
   if (install.code === 0) return;
-  const complaint = `${update.stderr}\n${install.stderr}`
-    .split('\n')
-    .find((line) => /^(E:|sudo:|setpriv:|.*ENOENT)/.test(line));
+  const lines = `${update.stderr}\n${install.stderr}`.split('\n');
+  const complaint = lines.find((line) => telling.test(line)) ?? `apt-get ended with ${install.code}`;
+  const byHand = `${isRoot() ? '' : 'sudo '}apt-get install ${list}`;
   throw new Trouble(
-    `Could not install ${list} from Debian's packages (${complaint ?? `apt-get ended with ${install.code}`}); ${byHand}.`,
+    `Could not install ${list} from Debian's packages (${complaint}); install by hand with: ${byHand}.`,
   );
 }

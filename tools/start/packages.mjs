@@ -19,12 +19,12 @@ export function packagesAreFresh(root) {
 /** Installs the npm packages of the lockfile when they are missing or stale. */
 export async function ensurePackages(root, { log } = {}) {
   if (packagesAreFresh(root)) return 'up to date';
-  const options = ['--include=dev', '--no-audit', '--no-fund', '--no-progress'];
+  const options = ['--include=dev', '--no-audit', '--no-fund', '--no-progress', '--loglevel=error'];
   const { code, stderr } = await run('npm', ['ci', ...options], { cwd: root, log });
   if (code === 0) return 'installed';
   const errors = stderr
     .split('\n')
-    .filter((line) => /^npm (error|ERR!)/.test(line) && !/code |complete log/.test(line));
+    .filter((line) => /^npm (error|ERR!)/.test(line) && !/ (code|errno|syscall|type) |complete log/.test(line));
   const reason = errors[0]?.replace(/^npm (error|ERR!)\s*/, '') ?? stderr.trim();
   throw new Trouble(`Could not install the npm packages (${reason}); see ${log} and start again.`);
 }
