@@ -24,7 +24,9 @@ export async function ensurePackages(root, { log } = {}) {
   if (code === 0) return 'installed';
   const errors = stderr
     .split('\n')
-    .filter((line) => /^npm (error|ERR!)/.test(line) && !/ (code|errno|syscall|type) |complete log/.test(line));
+    .filter(
+      (line) => /^npm (error|ERR!)/.test(line) && !/ (code|errno|syscall|type) |complete log/.test(line),
+    );
   const reason = errors[0]?.replace(/^npm (error|ERR!)\s*/, '') ?? stderr.trim();
   throw new Trouble(`Could not install the npm packages (${reason}); see ${log} and start again.`);
 }
