@@ -22,7 +22,7 @@ async function script(root, name, options, log) {
     log,
   });
   if (code === 0) return;
-  const output = stripVTControlCharacters(`${stdout}\n${stderr}`);
+  const output = stripVTControlCharacters(`${stderr}\n${stdout}`);
   const complaint = output.split('\n').find((line) => /error/i.test(line)) ?? lastLine(output);
   throw new Trouble(`The build failed in "${name}": ${complaint.trim()} (all of it in ${log}).`);
 }

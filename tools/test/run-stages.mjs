@@ -17,28 +17,43 @@ async function runStage({ name, work }, context) {
   return { name, seconds: (performance.now() - since) / 1000, log, ...counts };
 }
 
-/** Runs the stages one after the other; a failure stops none but those that need what failed. */
+const notRun = ({ name }, lacking) => ({
+  name,
+  seconds: 0,
+  passed: 0,
+  failed: 1,
+  skipped: 0,
+  note: `not run: ${lacking.name} failed`,
+});
+
+function tell({ name, passed, failed, seconds, log }) {
+  console.log(`${name}: ${passed} passed, ${failed} failed (${seconds.toFixed(1)} s)`);
+  if (failed > 0 && log) console.log(endOf(log));
+}
+
+/** Stages that go alongside each other, in their order. */
+function batches(stages) {
+  const all = [];
+  for (const stage of stages) {
+    if (stage.alongside && all.length > 0) all.at(-1).push(stage);
+    else all.push([stage]);
+  }
+  return all;
+}
+
+/** Runs the stages in order; a failure stops none but those that need what failed. */
 export async function runStages(stages, context, life) {
   const results = [];
-  for (const stage of stages) {
-    life.check();
+  const runOne = async (stage) => {
     const lacking = results.find(({ name, failed }) => failed > 0 && stage.needs?.includes(name));
-    const result = lacking
-      ? {
-          name: stage.name,
-          seconds: 0,
-          passed: 0,
-          failed: 1,
-          skipped: 0,
-          note: `not run: ${lacking.name} failed`,
-        }
-      : await runStage(stage, context);
+    const result = lacking ? notRun(stage, lacking) : await runStage(stage, context);
+    if (!life.asked) tell(result);
+    return result;
+  };
+  for (const batch of batches(stages)) {
     life.check();
-    results.push(result);
-    console.log(
-      `${stage.name}: ${result.passed} passed, ${result.failed} failed (${result.seconds.toFixed(1)} s)`,
-    );
-    if (result.failed > 0 && result.log) console.log(endOf(result.log));
+    results.push(...(await Promise.all(batch.map(runOne))));
   }
+  life.check();
   return results;
 }

@@ -1,11 +1,11 @@
 import { build, check, jest, playwright, vitest } from './runners.mjs';
 
-/** What `npm test` runs, in this order; `group` is what `--only` chooses. */
+/** What `npm test` runs, in this order; `group` is what `--only` chooses; `alongside` goes with the one before. */
 const stages = [
   { name: 'format', group: 'checks', work: check('format:check') },
-  { name: 'lint', group: 'checks', work: check('lint') },
+  { name: 'lint', group: 'checks', work: check('lint'), alongside: true },
   { name: 'types', group: 'checks', work: check('typecheck') },
-  { name: 'build', group: 'checks', work: build },
+  { name: 'build', group: 'checks', work: build, alongside: true },
   { name: 'unit', group: 'unit', work: jest('spec'), needs: ['database'] },
   { name: 'api', group: 'api', work: jest('e2e-spec'), needs: ['database'] },
   { name: 'web', group: 'web', work: vitest },
