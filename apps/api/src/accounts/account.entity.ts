@@ -1,4 +1,4 @@
-import { DistanceUnit } from '@halfpitch/contracts';
+import type { DistanceUnit } from '@halfpitch/contracts';
 import { Column, Entity, PrimaryColumn } from 'typeorm';
 import { v7 } from 'uuid';
 

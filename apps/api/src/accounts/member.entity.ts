@@ -1,4 +1,4 @@
-import { Role } from '@halfpitch/contracts';
+import type { Role } from '@halfpitch/contracts';
 import { Column, Entity } from 'typeorm';
 import { TenantEntity } from '../database/tenant-entity';
 

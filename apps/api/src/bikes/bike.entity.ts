@@ -1,4 +1,4 @@
-import { BikeKind, BrakeFluid } from '@halfpitch/contracts';
+import type { BikeKind, BrakeFluid } from '@halfpitch/contracts';
 import { Column, Entity } from 'typeorm';
 import { TenantEntity } from '../database/tenant-entity';
 

@@ -1,4 +1,4 @@
-import { Regime, RetiredReason } from '@halfpitch/contracts';
+import type { Regime, RetiredReason } from '@halfpitch/contracts';
 import { Column, Entity } from 'typeorm';
 import { TenantEntity } from '../database/tenant-entity';
 

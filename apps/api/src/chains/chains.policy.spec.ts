@@ -1,4 +1,4 @@
-import { mayFit, mayReachChain } from './chains.policy';
+import { mayFit, mayReachChain, mayRemoveChain } from './chains.policy';
 
 it('opens a chain to its own rider and to staff, and to no other rider', () => {
   const chain = { riderId: 'a' };
@@ -11,4 +11,10 @@ it('opens a chain to its own rider and to staff, and to no other rider', () => {
 it('lets a chain onto its own rider’s bikes only', () => {
   expect(mayFit({ riderId: 'a' }, { riderId: 'a' })).toBe(true);
   expect(mayFit({ riderId: 'a' }, { riderId: 'b' })).toBe(false);
+});
+
+it('keeps a treated chain from being removed by its rider', () => {
+  expect(mayRemoveChain({ role: 'rider' }, true)).toBe(false);
+  expect(mayRemoveChain({ role: 'rider' }, false)).toBe(true);
+  expect(mayRemoveChain({ role: 'owner' }, true)).toBe(true);
 });

@@ -11,7 +11,7 @@ import type {
 import type { Actor } from '../common/actor';
 import { refuseFuture } from '../common/calendar';
 import { Clock } from '../common/clock';
-import { notFound, unprocessable } from '../common/problems';
+import { conflict, notFound, unprocessable } from '../common/problems';
 import { Conditions, pageOfSql } from '../common/sql-page';
 import { TenantDb } from '../database/tenant-db';
 import { ridersInReach } from '../riders/riders.policy';
@@ -19,7 +19,7 @@ import { RidersService } from '../riders/riders.service';
 import { ChainChanges } from './chain-changes';
 import { CHAIN_COLUMNS, CHAIN_FROM, CHAIN_ORDER, ChainRow, toChain } from './chain-list';
 import { Chain } from './chain.entity';
-import { mayReachChain } from './chains.policy';
+import { mayReachChain, mayRemoveChain } from './chains.policy';
 import { FittingService } from './fitting.service';
 
 @Injectable()
@@ -117,7 +117,17 @@ export class ChainsService {
   /** Removes a chain with its readings, treatments and estimates; its rides stay with the bike. */
   async remove(actor: Actor, id: string): Promise<void> {
     await this.reach(actor, id);
+    if (!mayRemoveChain(actor, await this.wasTreated(id)))
+      throw conflict('The workshop keeps a record of its treatments. Retire it instead.');
     await this.db.manager.delete(Chain, id);
+  }
+
+  private async wasTreated(id: string): Promise<boolean> {
+    const found = await this.db.manager.query<unknown[]>(
+      'select from treatment where chain_id = $1 limit 1',
+      [id],
+    );
+    return found.length > 0;
   }
 
   /** What happened to a chain happened while it was in service. */

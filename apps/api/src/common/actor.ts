@@ -1,3 +1,4 @@
+import 'passport';
 import { createParamDecorator, ExecutionContext } from '@nestjs/common';
 import type { DistanceUnit, Role } from '@halfpitch/contracts';
 import type { Request } from 'express';
@@ -16,7 +17,14 @@ export interface Actor {
   timeZone: string;
 }
 
-/** Who signed in, in a controller's handler. */
+declare module 'express-serve-static-core' {
+  interface Request {
+    user?: Actor | undefined;
+  }
+}
+
+/** Who signed in, in a controller's handler; a handler that is not public always has one. */
 export const Who = createParamDecorator(
-  (_: unknown, context: ExecutionContext): Actor => context.switchToHttp().getRequest<Request>().user as Actor,
+  (_: unknown, context: ExecutionContext): Actor | undefined =>
+    context.switchToHttp().getRequest<Request>().user,
 );

@@ -2,7 +2,6 @@ import { CanActivate, ExecutionContext, Injectable } from '@nestjs/common';
 import { Reflector } from '@nestjs/core';
 import { roleMay } from '@halfpitch/contracts';
 import type { Request } from 'express';
-import type { Actor } from './actor';
 import { REQUIREMENT, Requirement } from './permit';
 import { forbidden, ProblemException } from './problems';
 
@@ -16,7 +15,7 @@ export class PermitGuard implements CanActivate {
       context.getClass(),
     ]);
     if (requirement === 'public') return true;
-    const actor = context.switchToHttp().getRequest<Request>().user as Actor | undefined;
+    const actor = context.switchToHttp().getRequest<Request>().user;
     if (!actor) throw new ProblemException(401, 'Not signed in', 'Sign in first.');
     if (requirement === 'signed-in') return true;
     if (requirement && roleMay(actor.role, requirement)) return true;

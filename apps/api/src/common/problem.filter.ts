@@ -44,7 +44,8 @@ export class ProblemFilter implements ExceptionFilter {
       if (known) return this.plain(...known);
     }
     const status = (error as { status?: unknown })?.status;
-    if (typeof status === 'number' && status >= 400 && status < 500) return this.plain(status, (error as Error).message);
+    if (typeof status === 'number' && status >= 400 && status < 500)
+      return this.plain(status, (error as Error).message);
     return this.plain(500, 'Something went wrong on our side. Nothing was saved; try again in a moment.');
   }
 

@@ -9,13 +9,16 @@ export function sameOrigin(publicUrl: string) {
     const origin = request.get('origin');
     const foreign = origin ? origin !== own : request.get('sec-fetch-site') === 'cross-site';
     if (SAFE.has(request.method) || !foreign) return next();
-    response.status(403).type('application/problem+json').send(
-      JSON.stringify({
-        type: 'about:blank',
-        title: 'Not allowed',
-        status: 403,
-        detail: `This request came from another address than ${own}. Open the page there and try again.`,
-      }),
-    );
+    response
+      .status(403)
+      .type('application/problem+json')
+      .send(
+        JSON.stringify({
+          type: 'about:blank',
+          title: 'Not allowed',
+          status: 403,
+          detail: `This request came from another address than ${own}. Open the page there and try again.`,
+        }),
+      );
   };
 }

@@ -14,15 +14,22 @@ describe('readEnvironment', () => {
   });
 
   it('names every missing or wrong value on a line of its own', () => {
-    const message = () => readEnvironment({ ...good, DATABASE_URL: 'nonsense', SMTP_URL: undefined, PORT: '99999' });
-    expect(message).toThrow(/\n {2}PORT is a port number.*\n {2}DATABASE_URL is not a valid.*\n {2}SMTP_URL is missing/s);
+    const message = () =>
+      readEnvironment({ ...good, DATABASE_URL: 'nonsense', SMTP_URL: undefined, PORT: '99999' });
+    expect(message).toThrow(
+      /\n {2}PORT is a port number.*\n {2}DATABASE_URL is not a valid.*\n {2}SMTP_URL is missing/s,
+    );
   });
 
   it('refuses the development secret, test hooks and plain http in production', () => {
     const { SESSION_SECRET: _, ...without } = good;
-    expect(() => readEnvironment({ ...without, NODE_ENV: 'production' })).toThrow(/SESSION_SECRET is the development/);
+    expect(() => readEnvironment({ ...without, NODE_ENV: 'production' })).toThrow(
+      /SESSION_SECRET is the development/,
+    );
     expect(() => readEnvironment({ ...good, NODE_ENV: 'production', TEST_HOOKS: '1' })).toThrow(/TEST_HOOKS/);
-    expect(() => readEnvironment({ ...good, NODE_ENV: 'production', PUBLIC_URL: 'http://a.example' })).toThrow(/https:/);
+    expect(() =>
+      readEnvironment({ ...good, NODE_ENV: 'production', PUBLIC_URL: 'http://a.example' }),
+    ).toThrow(/https:/);
     expect(readEnvironment({ ...good, NODE_ENV: 'production' }).NODE_ENV).toBe('production');
   });
 });

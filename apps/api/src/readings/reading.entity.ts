@@ -1,4 +1,4 @@
-import { ReadingMethod } from '@halfpitch/contracts';
+import type { ReadingMethod } from '@halfpitch/contracts';
 import { Column, Entity } from 'typeorm';
 import { TenantEntity } from '../database/tenant-entity';
 
@@ -31,4 +31,7 @@ export class Reading extends TenantEntity {
 
   @Column('text')
   byName: string;
+
+  @Column('uuid', { nullable: true })
+  byAccountId: string | null = null;
 }

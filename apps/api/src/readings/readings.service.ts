@@ -6,10 +6,10 @@ import { ChainsService } from '../chains/chains.service';
 import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { pageOf } from '../common/paging';
-import { notFound, unprocessable } from '../common/problems';
+import { forbidden, notFound, unprocessable } from '../common/problems';
 import { TenantDb } from '../database/tenant-db';
 import { Reading } from './reading.entity';
-import { mayReachReading, wrongReadingDay } from './readings.policy';
+import { mayReachReading, mayRemoveReading, wrongReadingDay } from './readings.policy';
 
 function toReading(reading: Reading): WireReading {
   const { id, chainId, day, method, valuesPct, lowerPct, upperPct, baseline, notes, byName } = reading;
@@ -57,6 +57,7 @@ export class ReadingsService {
       lowerPct: lower,
       upperPct: upper,
       byName: actor.name,
+      byAccountId: actor.accountId,
     });
     await this.db.manager.insert(Reading, reading);
     await this.changes.changed(chain.id);
@@ -68,6 +69,8 @@ export class ReadingsService {
     const reading = await manager.findOneBy(Reading, { id });
     const chain = reading && (await manager.findOneBy(Chain, { id: reading.chainId }));
     if (!reading || !chain || !mayReachReading(actor, chain)) throw notFound('reading');
+    if (!mayRemoveReading(actor, reading))
+      throw forbidden(`${reading.byName} measured that at the workshop; ask there to remove it.`);
     await manager.delete(Reading, id);
     await this.changes.changed(chain.id);
   }

@@ -1,4 +1,4 @@
-import { Reminder as WireReminder } from '@halfpitch/contracts';
+import type { Reminder as WireReminder } from '@halfpitch/contracts';
 import { Column, Entity } from 'typeorm';
 import { TenantEntity } from '../database/tenant-entity';
 

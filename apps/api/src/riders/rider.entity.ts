@@ -1,4 +1,4 @@
-import { DistanceUnit } from '@halfpitch/contracts';
+import type { DistanceUnit } from '@halfpitch/contracts';
 import { Column, Entity } from 'typeorm';
 import { TenantEntity } from '../database/tenant-entity';
 

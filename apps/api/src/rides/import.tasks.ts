@@ -36,7 +36,7 @@ export class ImportTasks implements OnModuleInit {
     const opened = await this.db.run(scope, () => this.open(workshopId, importId));
     if (!opened) return;
     const { target, file, timeZone, today } = opened;
-    const read = await readRides(target.fileName, file, timeZone, today);
+    const read = await readRides(target, file, { timeZone, today });
     await this.db.run(scope, () => this.begin(target, read));
     let done = target.added + target.alreadyThere;
     while (done < read.rides.length) {

@@ -42,6 +42,8 @@ export class ImportsService {
       fileName: file.originalname.slice(0, 200),
       surface: target.surface,
       weather: target.weather,
+      otherSports: target.otherSports,
+      matching: target.matching ?? null,
       file: file.buffer,
     });
     await this.db.manager.insert(RideImport, rideImport);

@@ -1,6 +1,11 @@
-import { readRides } from './read-rides';
+import type { CsvMatching } from '@halfpitch/ride-files';
+import { Choices, readRides } from './read-rides';
 
-const read = (name: string, text: string) => readRides(name, Buffer.from(text), 'UTC', '2026-12-01');
+const read = (fileName: string, text: string, choices: Partial<Choices> = {}) =>
+  readRides({ fileName, otherSports: 'leave', matching: null, ...choices }, Buffer.from(text), {
+    timeZone: 'UTC',
+    today: '2026-12-01',
+  });
 
 describe('a file on its way in', () => {
   it('gives rides with keys, and problems with their lines', async () => {
@@ -22,6 +27,32 @@ describe('a file on its way in', () => {
     const once = await read('log.csv', 'date,distance_km\n2026-05-01,12.5\n2026-05-02,8\n');
     const again = await read('renamed.csv', 'date,distance_km\n2026-05-01,12.5\n2026-05-02,8\n');
     expect(again.rides).toEqual(once.rides);
+  });
+
+  it('takes another sport only when told to', async () => {
+    const file = 'date,distance_km,sport\n2026-05-01,12,running\n2026-05-02,20,cycling\n';
+    expect((await read('log.csv', file)).rides).toHaveLength(1);
+    expect((await read('log.csv', file, { otherSports: 'take' })).rides).toHaveLength(2);
+  });
+
+  it('asks how the columns are meant, and goes by the answer', async () => {
+    const file = 'date,distance\n03/04/2026,12\n05/06/2026,20\n';
+    expect((await read('log.csv', file)).message).toContain('?');
+    const matching: CsvMatching = {
+      delimiter: ',',
+      hasHeader: true,
+      decimal: '.',
+      dateOrder: 'mdy',
+      distanceUnit: 'mi',
+      timeUnit: 'h',
+      columns: { date: 0, distance: 1 },
+    };
+    const { rides } = await read('log.csv', file, { matching });
+    // One international mile is 1,609.344 m (international yard and pound agreement, memory).
+    expect(rides.map(({ date, distanceM }) => [date, distanceM])).toEqual([
+      ['2026-03-04', 19_312],
+      ['2026-05-06', 32_187],
+    ]);
   });
 
   it('says in a sentence why nothing can be read', async () => {

@@ -1,5 +1,5 @@
 import { fingerprintAll, readWholeRideFile, summariseFile } from '@halfpitch/ride-files';
-import type { FileFormat, FileRide, RideFileResult } from '@halfpitch/ride-files';
+import type { CsvMatching, FileFormat, FileRide, RideFileResult } from '@halfpitch/ride-files';
 import type { RideImport as WireImport } from '@halfpitch/contracts';
 import { wrongDay } from './rides.policy';
 
@@ -16,9 +16,21 @@ export interface ReadFile {
   message: string;
 }
 
+/** What the rider says about the file. */
+export interface Choices {
+  fileName: string;
+  otherSports: 'leave' | 'take';
+  matching: CsvMatching | null;
+}
+interface Calendar {
+  timeZone: string;
+  today: string;
+}
+
 /** Why a recording is left out, or null where it is a ride to keep. */
-function refusal({ outcome, ride, message }: RideFileResult, today: string): string | null {
-  if (outcome !== 'ride' || !ride) return message;
+function refusal({ outcome, ride, message }: RideFileResult, { otherSports }: Choices, today: string) {
+  const wanted = outcome === 'ride' || (outcome === 'other-sport' && otherSports === 'take');
+  if (!wanted || !ride) return message;
   if (ride.distanceM < 1) return 'No distance was recorded: log it by hand if you know it.';
   if (ride.distanceM > 2_000_000) return `${Math.round(ride.distanceM / 1000)} km is too far for one ride.`;
   return wrongDay(ride.date, today);
@@ -26,16 +38,16 @@ function refusal({ outcome, ride, message }: RideFileResult, today: string): str
 
 /** Everything that a file holds, each recording either a ride or a problem; the same file always gives the same. */
 export async function readRides(
-  fileName: string,
+  choices: Choices,
   bytes: Uint8Array,
-  timeZone: string,
-  today: string,
+  { timeZone, today }: Calendar,
 ): Promise<ReadFile> {
-  const results = await readWholeRideFile(fileName, bytes, { timeZone });
+  const { fileName, matching } = choices;
+  const results = await readWholeRideFile(fileName, bytes, { timeZone, ...(matching && { matching }) });
   const rides: Omit<ReadRide, 'fingerprint'>[] = [];
   const problems: WireImport['problems'] = [];
   for (const result of results) {
-    const refused = refusal(result, today);
+    const refused = refusal(result, choices, today);
     if (refused === null) rides.push({ ...result.ride!, format: result.format! });
     else
       problems.push({

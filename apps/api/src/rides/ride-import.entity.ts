@@ -1,4 +1,5 @@
-import { RideImport as WireImport, Surface, Weather } from '@halfpitch/contracts';
+import type { RideImport as WireImport, Surface, Weather } from '@halfpitch/contracts';
+import type { CsvMatching } from '@halfpitch/ride-files';
 import { Column, Entity } from 'typeorm';
 import { TenantEntity } from '../database/tenant-entity';
 
@@ -19,6 +20,13 @@ export class RideImport extends TenantEntity {
 
   @Column('text')
   weather: Weather;
+
+  @Column('text')
+  otherSports: 'leave' | 'take' = 'leave';
+
+  /** How the columns of a CSV are to be read, where the rider was asked. */
+  @Column('jsonb', { nullable: true })
+  matching: CsvMatching | null = null;
 
   @Column('bytea', { nullable: true, select: false })
   file: Buffer | null = null;

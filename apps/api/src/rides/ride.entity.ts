@@ -1,4 +1,4 @@
-import { Ride as WireRide, Surface, Weather } from '@halfpitch/contracts';
+import type { Ride as WireRide, Surface, Weather } from '@halfpitch/contracts';
 import { Column, Entity } from 'typeorm';
 import { TenantEntity } from '../database/tenant-entity';
 

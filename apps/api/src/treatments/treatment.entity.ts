@@ -1,4 +1,4 @@
-import { ArrivalCondition, TreatmentKind } from '@halfpitch/contracts';
+import type { ArrivalCondition, TreatmentKind } from '@halfpitch/contracts';
 import { Column, Entity } from 'typeorm';
 import { TenantEntity } from '../database/tenant-entity';
 

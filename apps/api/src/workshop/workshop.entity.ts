@@ -4,7 +4,10 @@ import { Column, Entity, PrimaryColumn } from 'typeorm';
 import { v7 } from 'uuid';
 
 /** What of the settings is kept as one document: all but the columns of their own. */
-export type StoredSettings = Pick<WorkshopSettings, 'factors' | 'calendarLimitDays' | 'reminderPolicy' | 'bench'>;
+export type StoredSettings = Pick<
+  WorkshopSettings,
+  'factors' | 'calendarLimitDays' | 'reminderPolicy' | 'bench'
+>;
 
 /** A tenant. */
 @Entity('workshop')

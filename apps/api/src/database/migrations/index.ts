@@ -2,10 +2,12 @@ import { Accounts1764500000001 } from './1764500000001-accounts';
 import { BikesAndChains1764500000002 } from './1764500000002-bikes-and-chains';
 import { Log1764500000003 } from './1764500000003-log';
 import { EstimatesAndReminders1764500000004 } from './1764500000004-estimates-and-reminders';
+import { ImportChoices1764500000005 } from './1764500000005-import-choices';
 
 export const migrations = [
   Accounts1764500000001,
   BikesAndChains1764500000002,
   Log1764500000003,
   EstimatesAndReminders1764500000004,
+  ImportChoices1764500000005,
 ];

@@ -7,7 +7,9 @@ export const APP_ROLE = 'halfpitch_app';
 export async function wall(db: QueryRunner, table: string, visible: string): Promise<void> {
   await db.query(`grant select, insert, update, delete on ${table} to ${APP_ROLE}`);
   await db.query(`alter table ${table} enable row level security`);
-  await db.query(`create policy ${table}_wall on ${table} to ${APP_ROLE} using (${visible}) with check (${visible})`);
+  await db.query(
+    `create policy ${table}_wall on ${table} to ${APP_ROLE} using (${visible}) with check (${visible})`,
+  );
 }
 
 /** The wall of an ordinary tenant table: rows of the current workshop and no others. */

@@ -1,0 +1,49 @@
+import { Injectable } from '@nestjs/common';
+import { RateLimiterPostgres, RateLimiterRes } from 'rate-limiter-flexible';
+import { DataSource } from 'typeorm';
+import { ProblemException } from '../common/problems';
+
+const MINUTES = 15;
+
+/** Counts tries in PostgreSQL, so that any number of processes count together. */
+@Injectable()
+export class Throttle {
+  private readonly perAddress: RateLimiterPostgres;
+  private readonly perAccount: RateLimiterPostgres;
+
+  constructor(dataSource: DataSource) {
+    const limiter = (keyPrefix: string, points: number) =>
+      new RateLimiterPostgres({
+        storeClient: dataSource,
+        storeType: 'typeorm',
+        tableName: 'sign_in_throttle',
+        tableCreated: true,
+        keyPrefix,
+        points,
+        duration: MINUTES * 60,
+      });
+    this.perAddress = limiter('address', 100);
+    this.perAccount = limiter('account', 10);
+  }
+
+  /** Counts one try from `ip` at `email`. @throws 429 when there were too many. */
+  async count(ip: string, email: string): Promise<void> {
+    try {
+      await this.perAddress.consume(ip);
+      await this.perAccount.consume(email.toLowerCase());
+    } catch (refused) {
+      if (!(refused instanceof RateLimiterRes)) throw refused;
+      const minutes = Math.ceil(refused.msBeforeNext / 60_000);
+      throw new ProblemException(
+        429,
+        'Too many tries',
+        `Too many tries. Wait ${minutes} minutes and try again.`,
+      );
+    }
+  }
+
+  /** Forgets the tries at `email`, after one that succeeded. */
+  async forget(email: string): Promise<void> {
+    await this.perAccount.delete(email.toLowerCase());
+  }
+}
