@@ -1,13 +1,24 @@
 import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { parse } from 'csv-parse/sync';
-import { fingerprintAll, inspectCsv, readCsv, readWholeRideFile, summariseFile } from './index';
+import {
+  fingerprintAll,
+  inspectCsv,
+  readCsv,
+  readWholeRideFile,
+  sameRide,
+  summariseFile,
+  type FileRide,
+} from './index';
 
 /** Real files beside the checkout, where there are any; the tests of this file are skipped without them. */
 const files = join(__dirname, '../../../../shared/ride-files');
 const logs = join(__dirname, '../../../../shared/ridelogs/logs');
 
-type Row = Record<'file' | 'kind' | 'start' | 'distance_m' | 'timer_s' | 'elapsed_s', string>;
+type Row = Record<
+  'file' | 'kind' | 'start' | 'distance_m' | 'timer_s' | 'elapsed_s' | 'same_ride_group',
+  string
+>;
 
 const manifest = existsSync(files)
   ? (parse(readFileSync(join(files, 'manifest.csv')), { columns: true }) as Row[])
@@ -45,6 +56,23 @@ const rideKinds = ['ride', 'track'];
     const told = await read(file);
     expect(told).toMatchObject({ outcome: 'not-a-ride', date: null });
     close(told.distanceM, distance_m, 0.02);
+  });
+
+  it('knows the rides that are in the folder in several formats, and takes no others for one', async () => {
+    const rides: { group: string; ride: FileRide }[] = [];
+    for (const { file, same_ride_group } of kinds(...rideKinds)) {
+      for (const { outcome, ride } of await readWholeRideFile(file, readFileSync(join(files, file)))) {
+        if (outcome === 'ride' && ride) rides.push({ group: same_ride_group || file, ride });
+      }
+    }
+    for (const [i, a] of rides.entries()) {
+      for (const b of rides.slice(i + 1))
+        expect([a.group, b.group, sameRide(a.ride, b.ride)]).toEqual([
+          a.group,
+          b.group,
+          a.group === b.group && a.ride.date === b.ride.date,
+        ]);
+    }
   });
 
   it.each(manifest.filter(({ kind }) => /^no|^not/.test(kind)))('$file: $kind', async ({ file, kind }) => {

@@ -1,4 +1,4 @@
-import { looksLikeDate } from './guess';
+import { looksLikeDate } from './days';
 import type { Delimiter } from './matching';
 import { splitRows, type CsvRow } from './table';
 

@@ -15,6 +15,8 @@ const words: Record<CsvField, string[]> = {
     'mi',
     'miles',
     'm',
+    'metre',
+    'meter',
     'metres',
     'meters',
     'distanz',
@@ -46,12 +48,16 @@ const words: Record<CsvField, string[]> = {
 const distanceUnits: Record<string, DistanceUnit> = {
   km: 'km',
   kms: 'km',
+  kilometre: 'km',
+  kilometer: 'km',
   kilometres: 'km',
   kilometers: 'km',
   mi: 'mi',
   mile: 'mi',
   miles: 'mi',
   m: 'm',
+  metre: 'm',
+  meter: 'm',
   metres: 'm',
   meters: 'm',
 };
@@ -81,7 +87,7 @@ function split(header: string): [string, string] {
   const text = tidy(header);
   const last = text.slice(text.lastIndexOf(' ') + 1);
   if (last !== text && (last in distanceUnits || last in timeUnits))
-    return [text.slice(0, -last.length - 1), last];
+    return [text.slice(0, -last.length - 1).replace(/ in$/, ''), last];
   return [text, ''];
 }
 

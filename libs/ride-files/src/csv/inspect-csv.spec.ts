@@ -15,7 +15,7 @@ it('shows what it made of a log before anything is saved', () => {
   expect(shown.columns.map(({ header }) => header)).toEqual(['date', 'distance_km', 'indoor']);
   expect(shown.rides).toMatchObject([{ line: 2, date: '2025-05-03', distanceM: 12_500, indoor: null }]);
   expect(shown.problems).toEqual([
-    { line: 3, outcome: 'unreadable', message: '“soon” is not a date in the order chosen.' },
+    { line: 3, outcome: 'unreadable', message: '“soon” is not a date that can be read.' },
   ]);
   expect(shown.rows).toBe(2);
 });
@@ -107,4 +107,41 @@ it('reads text as spreadsheets write it: UTF-16 and Windows-1252', () => {
     [...text.replace('weather', 'dur\u00e9e').replace('wet', '0:30')].map((letter) => letter.charCodeAt(0)),
   );
   expect(readCsv(latin).rides).toMatchObject([{ movingS: 1800 }]);
+});
+
+it.each([
+  ['day and named month', 'date,km', '3 May 2025,12', '2025-05-03'],
+  ['named month, American', 'date;km', '"May 3, 2025";12', '2025-05-03'],
+  ['weekday before it', 'date;km', 'Sat, 03-May-25;12', '2025-05-03'],
+  ['time after it', 'date,km', '2025-05-03 18:30,12', '2025-05-03'],
+  ['no dashes', 'date,km', '20250503,12', '2025-05-03'],
+])('reads a date with %s', (_, header, row, date) => {
+  const { rides, questions } = inspectCsv(bytes(header, row));
+  expect(questions).toEqual([]);
+  expect(rides).toMatchObject([{ date, distanceM: 12_000 }]);
+});
+
+it.each([
+  ['hours and minutes', ['20,0:58', '45,2:10'], [3480, 7800]],
+  ['minutes and seconds', ['0.5,1:30', '3,12:05'], [90, 725]],
+  ['minutes and seconds beside hours', ['1,2:30', '45,2:10:00'], [150, 7800]],
+  ['the time of day, which is no duration', ['20,08:15', '25,17:45'], [null, null]],
+])('reads times with one colon as %s, by the speed that they would give', (_, rows, times) => {
+  const { rides } = inspectCsv(bytes('date,km,time', ...rows.map((row) => `2025-05-03,${row}`)));
+  expect(rides.map(({ movingS }) => movingS)).toEqual(times);
+});
+
+it.each([
+  ['a title above the table', ['Rides of the year', '', 'date,km', '2025-05-03,12']],
+  ['a line that names the delimiter', ['sep=;', 'date;km', '2025-05-03;12']],
+  ['quotes around everything', ['"date","Distance in km"', '"2025-05-03","12"']],
+])('reads a table with %s', (_, lines) => {
+  const { rides, questions } = inspectCsv(bytes(...lines));
+  expect(questions).toEqual([]);
+  expect(rides).toMatchObject([{ line: lines.length, date: '2025-05-03', distanceM: 12_000 }]);
+});
+
+it('asks for the date when the column of that name holds none', () => {
+  const { questions } = inspectCsv(bytes('date,km', 'Saturday,12'));
+  expect(questions.map(({ about }) => about)).toEqual(['date']);
 });

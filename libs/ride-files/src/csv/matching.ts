@@ -14,6 +14,8 @@ export type Delimiter = ',' | ';' | '\t' | '|';
 export type DateOrder = 'ymd' | 'dmy' | 'mdy';
 export type DistanceUnit = 'km' | 'mi' | 'm';
 export type TimeUnit = 's' | 'min' | 'h';
+/** What a time with one colon, '1:23', means. */
+export type ShortClock = 'h:m' | 'm:s';
 
 /** How the columns of a CSV are to be read: guessed by inspectCsv, corrected by the rider, used by readCsv. */
 export interface CsvMatching {
@@ -24,6 +26,7 @@ export interface CsvMatching {
   distanceUnit: DistanceUnit;
   /** Unit of plain numbers in time columns; 1:23:45 reads as hours whatever it says. */
   timeUnit: TimeUnit;
+  shortClock: ShortClock;
   /** Column number, counted from 0, of each field that the file has. */
   columns: Partial<Record<CsvField, number>>;
 }

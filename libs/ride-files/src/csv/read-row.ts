@@ -1,6 +1,7 @@
 import { startInstant } from './start';
 import type { CsvField, CsvMatching, CsvProblem, CsvRide } from './matching';
-import { parseDay, parseDistance, parseDuration } from './values';
+import { parseDay } from './days';
+import { parseDistance, parseDuration } from './values';
 import { surfaceOf, weatherOf, yesOrNo } from './words';
 import type { CsvRow } from './table';
 import { isCycling, isIndoor } from '../sport';
@@ -17,7 +18,7 @@ export function readRow(row: CsvRow, matching: CsvMatching): CsvRide | CsvProble
   });
   const cell = (field: CsvField) => row.cells[matching.columns[field] ?? -1] ?? '';
   const date = parseDay(cell('date'), matching.dateOrder);
-  if (date === null) return problem(`“${shorten(cell('date'))}” is not a date in the order chosen.`);
+  if (date === null) return problem(`“${shorten(cell('date'))}” is not a date that can be read.`);
   const distance = parseDistance(cell('distance'), matching.distanceUnit, matching.decimal);
   if (distance === null) return problem(`“${shorten(cell('distance'))}” is not a distance.`);
   const distanceM = Math.round(distance);
@@ -50,7 +51,7 @@ export function readRow(row: CsvRow, matching: CsvMatching): CsvRide | CsvProble
 /** Whole seconds, null for an empty cell, undefined for one that cannot be read. */
 function duration(text: string, matching: CsvMatching): number | null | undefined {
   if (text === '') return null;
-  const seconds = parseDuration(text, matching.timeUnit, matching.decimal);
+  const seconds = parseDuration(text, matching.timeUnit, matching.decimal, matching.shortClock);
   return seconds === null || seconds < 0 || seconds > 7 * 86_400 ? undefined : Math.round(seconds);
 }
 

@@ -8,7 +8,7 @@ export interface CsvRow {
   cells: string[];
 }
 
-export const MAX_CSV_ROWS = 200_000;
+export const MAX_CSV_ROWS = 100_000;
 const MAX_ROW_CHARS = 20_000;
 
 /** Splits text into rows; throws UnreadableFile with a plain sentence when it cannot. */
@@ -27,12 +27,19 @@ export function splitRows(text: string, delimiter: Delimiter, limit = MAX_CSV_RO
   };
   try {
     const rows = parse(text, options) as unknown as { record: string[]; info: { lines: number } }[];
-    return rows.map(({ record, info }) => ({ line: info.lines, cells: record }));
+    return withoutTitle(rows.map(({ record, info }) => ({ line: info.lines, cells: record })));
   } catch {
     throw new UnreadableFile(
       'The table breaks off inside a quoted cell or has a row that is far too long: save it again as CSV.',
     );
   }
+}
+
+/** Drops lines above the table that fill one cell only, such as a title, where the table has more columns. */
+function withoutTitle(rows: CsvRow[]): CsvRow[] {
+  const filled = (row: CsvRow) => row.cells.filter((cell) => cell !== '').length;
+  const first = rows.slice(0, 10).findIndex((row) => filled(row) >= 2);
+  return first > 0 ? rows.slice(first) : rows;
 }
 
 /** Bytes of a CSV as text; a picture or a spreadsheet file is refused with a plain sentence. */

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
-import { metresIn, parseDay, parseDistance, parseDuration, parseNumber } from './values';
+import { parseDay } from './days';
+import { metresIn, parseDistance, parseDuration, parseNumber } from './values';
 
 const days = fc
   .date({ min: new Date('1990-01-01'), max: new Date('2089-12-31'), noInvalidDate: true })

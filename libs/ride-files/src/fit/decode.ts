@@ -12,6 +12,9 @@ import { UnreadableFile } from '../unreadable';
 /** A day of riding keeps some 100,000 messages; beyond this the file is no recording. */
 const MAX_MESSAGES = 2_000_000;
 
+/** What a ride does not need: heart rates beside the records, and fields derived from others. */
+const sparing = { mergeHeartRates: false, expandComponents: false, expandSubFields: false };
+
 /** The few messages of a FIT file that a ride needs. */
 export interface FitContents {
   kinds: string[];
@@ -48,7 +51,7 @@ export function decodeFit(bytes: Uint8Array): FitContents {
       throw new UnreadableFile('The file is too long for one recording: split it on the device.');
     keep(contents, number, message);
   };
-  const { errors } = new Decoder(Stream.fromByteArray(bytes)).read({ mergeHeartRates: false, mesgListener });
+  const { errors } = new Decoder(Stream.fromByteArray(bytes)).read({ ...sparing, mesgListener });
   const [error] = errors;
   if (error instanceof UnreadableFile) throw error;
   if (error?.message.includes('compressed timestamp')) {
