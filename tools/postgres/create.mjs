@@ -1,6 +1,6 @@
 import { mkdirSync, renameSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { lastLine, run } from '../process/run.mjs';
+import { complaintIn, run } from '../process/run.mjs';
 import { Trouble } from '../process/trouble.mjs';
 import { makePasswords } from './passwords.mjs';
 
@@ -25,6 +25,6 @@ export async function createCluster({ dir, bin, identity, throwAway }) {
   );
   rmSync(passwordFile, { force: true });
   if (code !== 0)
-    throw new Trouble(`PostgreSQL could not set up its data folder in ${dir}: ${lastLine(stderr)}.`);
+    throw new Trouble(`PostgreSQL could not set up its data folder in ${dir}: ${complaintIn(stderr)}.`);
   renameSync(unfinished, join(dir, 'postgres'));
 }

@@ -1,5 +1,5 @@
 import { join } from 'node:path';
-import { lastLine, run } from '../process/run.mjs';
+import { complaintIn, run } from '../process/run.mjs';
 import { Trouble } from '../process/trouble.mjs';
 
 const role = (name, password) => `
@@ -37,7 +37,7 @@ export async function ensureRoles({ bin, port, passwords }) {
     ],
     { input: sql, env: { PATH: process.env.PATH, PGPASSWORD: passwords.admin } },
   );
-  if (code !== 0) throw new Trouble(`PostgreSQL refused to set up the database: ${lastLine(stderr)}.`);
+  if (code !== 0) throw new Trouble(`PostgreSQL refused to set up the database: ${complaintIn(stderr)}.`);
 }
 
 /** Addresses of the database, by role: `app` for the server, `owner` for migrations, `admin` for tests. */

@@ -49,7 +49,13 @@ export function endRunning() {
   }
 }
 
-/** The last line with something in it: what a failed command had to say. */
+/** The last line with something in it. */
 export function lastLine(text) {
   return text.trim().split('\n').at(-1)?.trim() ?? '';
+}
+
+/** What a failed command had to say: its last line that names an error, otherwise its last line. */
+export function complaintIn(text) {
+  const naming = text.split('\n').findLast((line) => /error/i.test(line) && !/^\s+at /.test(line));
+  return naming?.trim() ?? lastLine(text);
 }

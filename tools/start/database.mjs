@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { startCluster } from '../postgres/cluster.mjs';
 import { ended } from '../process/bound-child.mjs';
 import { stoppedSentence } from '../process/log-file.mjs';
-import { lastLine, run } from '../process/run.mjs';
+import { complaintIn, lastLine, run } from '../process/run.mjs';
 import { Trouble } from '../process/trouble.mjs';
 
 /** Starts the cluster as a part of the product: its end by itself is a crash. */
@@ -25,7 +25,7 @@ async function program({ cli, name, args = [], env, dir, onLine }) {
     onLine,
   });
   if (code !== 0)
-    throw new Trouble(`${name}.js failed: ${lastLine(stderr) || lastLine(stdout)} (log: ${log}).`);
+    throw new Trouble(`${name}.js failed: ${complaintIn(stderr) || lastLine(stdout)} (log: ${log}).`);
   return stdout;
 }
 
