@@ -24,21 +24,17 @@ export interface FileTime {
   offsetS: number | null;
 }
 
-/** Reads an ISO 8601 time as GPX and TCX write it; null when it is none. */
+/** Reads an ISO 8601 time as GPX and TCX write it, zones with or without a colon; null when it is none. */
 export function fileTime(text: string): FileTime | null {
-  const iso = /^(\d{4}-\d{2}-\d{2}T\d{2}:\d{2}(?::\d{2}(?:\.\d+)?)?)(Z|[+-]\d{2}:\d{2})?$/.exec(text.trim());
-  if (!iso) return null;
-  const zone = iso[2];
-  const time = Date.parse(`${iso[1]}${zone ?? 'Z'}`);
-  if (Number.isNaN(time)) return null;
-  if (zone === undefined) return { time, zoned: false, offsetS: 0 };
-  if (zone === 'Z') return { time, zoned: true, offsetS: null };
-  const sign = zone.startsWith('-') ? -1 : 1;
-  return {
-    time,
-    zoned: true,
-    offsetS: sign * (Number(zone.slice(1, 3)) * 3600 + Number(zone.slice(4, 6)) * 60),
-  };
+  const iso = /^(\d{4}-\d{2}-\d{2}T\d{2}:\d{2}(?::\d{2}(?:\.\d+)?)?)(?:(Z)|([+-])(\d{2}):?(\d{2}))?$/.exec(
+    text.trim(),
+  );
+  const wall = Date.parse(`${iso?.[1]}Z`);
+  if (!iso || Number.isNaN(wall)) return null;
+  if (iso[2]) return { time: wall, zoned: true, offsetS: null };
+  if (!iso[3]) return { time: wall, zoned: false, offsetS: 0 };
+  const offsetS = (iso[3] === '-' ? -1 : 1) * (Number(iso[4]) * 3600 + Number(iso[5]) * 60);
+  return { time: wall - offsetS * 1000, zoned: true, offsetS };
 }
 
 /** Local calendar day of a start: by the file's own offset, else by the zone given, else in UTC. */

@@ -3,7 +3,7 @@ import type { FileRide } from './types';
 type Told = Pick<FileRide, 'date' | 'startedAt' | 'distanceM'>;
 
 /** What is alike in rides that one file may hold twice: day, start where known, distance to 10 m. */
-export function rideLikeness(ride: Told): string {
+function rideLikeness(ride: Told): string {
   const start = ride.startedAt === null ? '-' : new Date(ride.startedAt).toISOString().slice(0, 19);
   return `${ride.date}|${start}|${Math.round(ride.distanceM / 10)}`;
 }

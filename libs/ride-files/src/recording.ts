@@ -57,10 +57,12 @@ function toRide(recording: Recording, timeZone: string | undefined): FileRide {
   };
 }
 
-const otherSport = (sport: string | null) =>
-  sport === null
+function otherSport(sport: string | null): string {
+  const words = sportWords(sport ?? '');
+  return words === ''
     ? 'The file does not say which sport it holds.'
-    : `The file holds another sport (${sportWords(sport)}).`;
+    : `The file holds another sport (${words}).`;
+}
 
 const whole = (seconds: number | null) => (seconds === null ? null : Math.round(seconds));
 
