@@ -56,19 +56,26 @@ it.each([
   });
 });
 
-it('refuses a zip whose directory understates what is in it, and keeps the rest of the batch', async () => {
-  const ride = fitActivity([
-    { start: '2025-05-03T08:00:00Z', sport: 'cycling', metres: 9000, timerS: 1800, elapsedS: 1800 },
-  ]);
-  const bytes = zipSync({ 'lies.gpx': new TextEncoder().encode(gpx(' '.repeat(100_000))), 'ride.fit': ride });
-  const directory = Buffer.from(bytes).indexOf(Buffer.from([0x50, 0x4b, 1, 2]));
-  new DataView(bytes.buffer, bytes.byteOffset).setUint32(directory + 24, 10, true);
-  const results = await readWholeRideFile('batch.zip', bytes);
-  expect(results.map(({ file, outcome }) => [file, outcome])).toEqual([
-    ['batch.zip/lies.gpx', 'unreadable'],
-    ['batch.zip/ride.fit', 'ride'],
-  ]);
-});
+it.each([10, 500_000])(
+  'refuses a file for which the directory claims %i bytes, and keeps the rest of the batch',
+  async (claimed) => {
+    const ride = fitActivity([
+      { start: '2025-05-03T08:00:00Z', sport: 'cycling', metres: 9000, timerS: 1800, elapsedS: 1800 },
+    ]);
+    const bytes = zipSync({
+      'lies.gpx': new TextEncoder().encode(gpx(' '.repeat(100_000))),
+      'ride.fit': ride,
+    });
+    const directory = Buffer.from(bytes).indexOf(Buffer.from([0x50, 0x4b, 1, 2]));
+    new DataView(bytes.buffer, bytes.byteOffset).setUint32(directory + 24, claimed, true);
+    const results = await readWholeRideFile('batch.zip', bytes);
+    expect(results.map(({ file, outcome }) => [file, outcome])).toEqual([
+      ['batch.zip/lies.gpx', 'unreadable'],
+      ['batch.zip/ride.fit', 'ride'],
+    ]);
+    expect(results[0]?.message).toMatch(/damaged|breaks off/);
+  },
+);
 
 it('stops unpacking a gzip bomb at the limit', async () => {
   const { gzipSync } = await import('node:zlib');
