@@ -1,4 +1,4 @@
-import { Module } from '@nestjs/common';
+import { DynamicModule, Module } from '@nestjs/common';
 import { ConfigModule } from '@nestjs/config';
 import { APP_FILTER, APP_GUARD, APP_INTERCEPTOR, APP_PIPE, Reflector } from '@nestjs/core';
 import { StandardSchemaSerializerInterceptor } from '@nestjs/common';
@@ -10,7 +10,7 @@ import { PermitGuard } from './common/permit.guard';
 import { ProblemFilter } from './common/problem.filter';
 import { TransactionInterceptor } from './common/transaction.interceptor';
 import { validationPipe } from './common/validation';
-import { readEnvironment } from './config/environment';
+import { Environment } from './config/environment';
 import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
 import { JobsModule } from './jobs/jobs.module';
@@ -23,7 +23,6 @@ import { WorkshopModule } from './workshop/workshop.module';
 
 @Module({
   imports: [
-    ConfigModule.forRoot({ isGlobal: true, ignoreEnvFile: true, validate: readEnvironment }),
     CommonModule,
     DatabaseModule,
     JobsModule,
@@ -50,4 +49,15 @@ import { WorkshopModule } from './workshop/workshop.module';
     { provide: APP_INTERCEPTOR, useClass: TransactionInterceptor },
   ],
 })
-export class AppModule {}
+export class AppModule {
+  /** The whole program in an environment that was read and checked. */
+  static in(environment: Environment): DynamicModule {
+    const config = ConfigModule.forRoot({
+      isGlobal: true,
+      ignoreEnvFile: true,
+      skipProcessEnv: true,
+      load: [() => environment],
+    });
+    return { module: AppModule, imports: [config] };
+  }
+}

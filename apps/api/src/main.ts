@@ -1,10 +1,9 @@
 import 'reflect-metadata';
 import { ConsoleLogger } from '@nestjs/common';
-import { ConfigService } from '@nestjs/config';
 import { NestFactory } from '@nestjs/core';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { AppModule } from './app.module';
-import { Environment, readEnvironment } from './config/environment';
+import { readEnvironment } from './config/environment';
 import { configure } from './configure';
 
 /** One program, three roles: http, scheduler, or both (ROLE). */
@@ -15,14 +14,13 @@ async function main(): Promise<void> {
     logLevels: ['log', 'warn', 'error', 'fatal'],
   });
   if (env.ROLE === 'scheduler') {
-    const app = await NestFactory.createApplicationContext(AppModule, { logger });
+    const app = await NestFactory.createApplicationContext(AppModule.in(env), { logger });
     app.enableShutdownHooks();
     return;
   }
-  const app = await NestFactory.create<NestExpressApplication>(AppModule, { logger });
+  const app = await NestFactory.create<NestExpressApplication>(AppModule.in(env), { logger });
   configure(app);
-  const config = app.get<ConfigService<Environment, true>>(ConfigService);
-  await app.listen(config.get<number>('PORT'), config.get<string>('HOST'));
+  await app.listen(env.PORT, env.HOST);
 }
 
 main().catch((error: Error) => {

@@ -107,6 +107,26 @@ describe('a log of rides', () => {
   });
 });
 
+it('is read as the rider matched its columns', async () => {
+  const [year, month, day] = daysAgo(3).split('-');
+  const file = `day;far\n${day}/${month}/${year};12,5\n`;
+  const matching = {
+    delimiter: ';',
+    hasHeader: true,
+    decimal: ',',
+    dateOrder: 'dmy',
+    distanceUnit: 'mi',
+    timeUnit: 'h',
+    shortClock: 'h:m',
+    columns: { date: 0, distance: 1 },
+  };
+  const fields = { bikeId: bike.id, matching: JSON.stringify(matching) };
+  expect(await imported(file, 'miles.csv', fields)).toMatchObject({ added: 1 });
+  expect((await rides()).items).toMatchObject([{ day: daysAgo(3), distanceM: 20_117 }]);
+  await send(file, 'miles.csv', { bikeId: bike.id, matching: '{oops' }).expect(400);
+  await send(file, 'miles.csv', { bikeId: bike.id, matching: '{}' }).expect(400);
+});
+
 /** Spares the pause that the queue makes before it tries again. */
 async function retryAtOnce(): Promise<void> {
   const database = booted.app.get(DataSource);

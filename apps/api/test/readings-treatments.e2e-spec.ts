@@ -71,8 +71,10 @@ describe('readings', () => {
     const { total, items } = await readings();
     expect(total).toBe(2);
     expect(items[0]).toMatchObject({ ...dropIn, by: 'Mo Mechanic' });
-    await browser.delete(`/api/readings/${items[0].id}`).expect(200);
-    expect((await readings()).total).toBe(1);
+    await browser.delete(`/api/readings/${items[0].id}`).expect(403);
+    await mechanic.delete(`/api/readings/${items[0].id}`).expect(200);
+    await browser.delete(`/api/readings/${figures.body.id}`).expect(200);
+    expect((await readings()).total).toBe(0);
   });
 
   it.each([
@@ -161,5 +163,7 @@ describe('treatments', () => {
     await stranger.delete(`/api/treatments/${body.id}`).expect(404);
     await stranger.get('/api/treatments').query({ chainId: chain.id }).expect(404);
     expect((await treatments(desk)).total).toBe(1);
+    await browser.delete(`/api/chains/${chain.id}`).expect(409);
+    await owner.delete(`/api/chains/${chain.id}`).expect(200);
   });
 });

@@ -46,7 +46,7 @@ export class RegistrationService {
     });
     const ids = { workshopId: workshop.id, accountId: account.id };
     await this.db.enter(ids);
-    await manager.insert(Workshop, workshop);
+    await manager.save(Workshop, workshop);
     if (!present) await manager.insert(Account, account);
     await manager.insert(Member, Object.assign(new Member(), { ...ids, role: 'owner', name, email }));
     return ids;

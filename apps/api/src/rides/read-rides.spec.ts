@@ -30,9 +30,15 @@ describe('a file on its way in', () => {
   });
 
   it('takes another sport only when told to', async () => {
-    const file = 'date,distance_km,sport\n2026-05-01,12,running\n2026-05-02,20,cycling\n';
-    expect((await read('log.csv', file)).rides).toHaveLength(1);
-    expect((await read('log.csv', file, { otherSports: 'take' })).rides).toHaveLength(2);
+    const file = `<gpx xmlns="http://www.topografix.com/GPX/1/1"><trk><type>running</type><trkseg>
+      <trkpt lat="48" lon="9"><time>2026-05-01T08:00:00Z</time></trkpt>
+      <trkpt lat="48.01" lon="9"><time>2026-05-01T08:06:00Z</time></trkpt></trkseg></trk></gpx>`;
+    const { rides, message } = await read('run.gpx', file);
+    expect(rides).toEqual([]);
+    expect(message).toContain('another sport');
+    expect((await read('run.gpx', file, { otherSports: 'take' })).rides).toMatchObject([
+      { date: '2026-05-01' },
+    ]);
   });
 
   it('asks how the columns are meant, and goes by the answer', async () => {
@@ -45,6 +51,7 @@ describe('a file on its way in', () => {
       dateOrder: 'mdy',
       distanceUnit: 'mi',
       timeUnit: 'h',
+      shortClock: 'h:m',
       columns: { date: 0, distance: 1 },
     };
     const { rides } = await read('log.csv', file, { matching });

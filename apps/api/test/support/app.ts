@@ -3,6 +3,9 @@ import { Test } from '@nestjs/testing';
 import type { Session } from '@halfpitch/contracts';
 import request from 'supertest';
 import { MailFake, startMailFake } from './mail-fake';
+import { AppModule } from '../../src/app.module';
+import { readEnvironment } from '../../src/config/environment';
+import { configure } from '../../src/configure';
 import { scratchDatabase } from './database';
 
 export interface BootedApp {
@@ -19,7 +22,7 @@ export interface BootedApp {
 export async function bootApp(environment: Record<string, string> = {}): Promise<BootedApp> {
   const database = await scratchDatabase();
   const mail = await startMailFake();
-  Object.assign(process.env, {
+  const env = readEnvironment({
     NODE_ENV: 'test',
     ROLE: 'both',
     PORT: '0',
@@ -30,9 +33,7 @@ export async function bootApp(environment: Record<string, string> = {}): Promise
     TEST_HOOKS: '1',
     ...environment,
   });
-  const { AppModule } = await import('../../src/app.module');
-  const { configure } = await import('../../src/configure');
-  const module = await Test.createTestingModule({ imports: [AppModule] }).compile();
+  const module = await Test.createTestingModule({ imports: [AppModule.in(env)] }).compile();
   const app = module.createNestApplication<NestExpressApplication>({ logger: ['error', 'fatal'] });
   configure(app);
   await app.listen(0, '127.0.0.1');

@@ -1,0 +1,13 @@
+export * from './types';
+export { dayOf, isoDay } from './day';
+export { defaultFactors } from './distance/default-factors';
+export { equivalentKm, rideFactor } from './distance/equivalent-km';
+export { elongationFromInches, elongationPct, PITCH_MM } from './elongation/arithmetic';
+export { defaultWearLimitPct } from './elongation/limits';
+export { EstimationError, ImpossibleInputError } from './errors';
+export { estimateChain } from './estimate-chain';
+export { defaultFleetModel } from './fleet-model';
+export { defaultRidingModel, forecastRiding } from './riding';
+export { poissonBinomial } from './workload/poisson-binomial';
+export type { ChainChances, WeekLoad, WorkloadOptions } from './workload/workload';
+export { workload } from './workload/workload';

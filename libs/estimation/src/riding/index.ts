@@ -1,0 +1,2 @@
+export { defaultRidingModel, HORIZON_DAYS } from './model';
+export { forecastRiding } from './forecast';
