@@ -3,6 +3,7 @@ export * from './bikes';
 export * from './chains';
 export * from './common';
 export * from './estimates';
+export * from './imports';
 export * from './permissions';
 export * from './readings';
 export * from './reminders';

@@ -48,36 +48,3 @@ export const ridingDayQuery = z
     path: ['bikeId'],
   });
 export type RidingDayQuery = z.infer<typeof ridingDayQuery>;
-
-/** The largest file that POST /api/imports takes. */
-export const MAX_IMPORT_BYTES = 20 * 1024 * 1024;
-/**
- * POST /api/imports (multipart: file, bikeId or chainId, surface and weather for what the file does not say).
- * A chain stands for the bike it is on.
- */
-export const importTarget = z
-  .object({
-    bikeId: id.optional(),
-    chainId: id.optional(),
-    surface: z.enum(surfaces).default('road'),
-    weather: z.enum(weathers).default('unknown'),
-  })
-  .refine((q) => (q.bikeId === undefined) !== (q.chainId === undefined), {
-    message: 'Name either a bike or a chain.',
-    path: ['bikeId'],
-  });
-export type ImportTarget = z.infer<typeof importTarget>;
-/** POST /api/imports, and GET /api/imports/:id, polled while it runs. */
-export const rideImport = z.object({
-  id,
-  fileName: z.string(),
-  state: z.enum(['waiting', 'running', 'done', 'failed']),
-  total: z.number().int(),
-  added: z.number().int(),
-  alreadyThere: z.number().int(),
-  refused: z.number().int(),
-  /** What was wrong, line by line (null where the file has no lines), at most the first 50. */
-  problems: z.array(z.object({ line: z.number().int().nullable(), message: z.string() })),
-  message: z.string(),
-});
-export type RideImport = z.infer<typeof rideImport>;
