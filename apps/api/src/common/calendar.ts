@@ -18,10 +18,3 @@ export function plusDays(day: string, days: number): string {
   date.setUTCDate(date.getUTCDate() + days);
   return date.toISOString().slice(0, 10);
 }
-
-/** A calendar day as the estimation library counts them: whole days since 1970-01-01. */
-export const dayNumber = (day: string): number => Date.parse(`${day}T00:00:00Z`) / 86_400_000;
-
-/** The calendar day of a count of days since 1970-01-01. */
-export const dayOfNumber = (number: number): string =>
-  new Date(number * 86_400_000).toISOString().slice(0, 10);
