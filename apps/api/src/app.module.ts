@@ -2,6 +2,7 @@ import { DynamicModule, Module } from '@nestjs/common';
 import { ConfigModule } from '@nestjs/config';
 import { APP_FILTER, APP_GUARD, APP_INTERCEPTOR, APP_PIPE, Reflector } from '@nestjs/core';
 import { StandardSchemaSerializerInterceptor } from '@nestjs/common';
+import { ScheduleModule } from '@nestjs/schedule';
 import { AccountsModule } from './accounts/accounts.module';
 import { BikesModule } from './bikes/bikes.module';
 import { ChainsModule } from './chains/chains.module';
@@ -12,6 +13,10 @@ import { TransactionInterceptor } from './common/transaction.interceptor';
 import { validationPipe } from './common/validation';
 import { Environment } from './config/environment';
 import { DatabaseModule } from './database/database.module';
+import { EstimatesModule } from './estimates/estimates.module';
+import { RemindersModule } from './reminders/reminders.module';
+import { TestHooksModule } from './test-hooks/test-hooks.module';
+import { WorkloadModule } from './workload/workload.module';
 import { HealthModule } from './health/health.module';
 import { JobsModule } from './jobs/jobs.module';
 import { MailModule } from './mail/mail.module';
@@ -23,6 +28,7 @@ import { WorkshopModule } from './workshop/workshop.module';
 
 @Module({
   imports: [
+    ScheduleModule.forRoot(),
     CommonModule,
     DatabaseModule,
     JobsModule,
@@ -36,6 +42,9 @@ import { WorkshopModule } from './workshop/workshop.module';
     RidesModule,
     ReadingsModule,
     TreatmentsModule,
+    EstimatesModule,
+    RemindersModule,
+    WorkloadModule,
   ],
   providers: [
     { provide: APP_FILTER, useClass: ProblemFilter },
@@ -58,6 +67,6 @@ export class AppModule {
       skipProcessEnv: true,
       load: [() => environment],
     });
-    return { module: AppModule, imports: [config] };
+    return { module: AppModule, imports: environment.TEST_HOOKS ? [config, TestHooksModule] : [config] };
   }
 }

@@ -8,6 +8,7 @@ import passport from 'passport';
 import { Pool } from 'pg';
 import { sameOrigin } from './common/same-origin';
 import { Environment } from './config/environment';
+import { mountDocs } from './docs';
 
 const THIRTY_DAYS_MS = 30 * 86_400_000;
 
@@ -53,6 +54,7 @@ export function configure(app: NestExpressApplication): void {
     passport.initialize(),
     passport.session(),
   );
+  mountDocs(app);
   app.getHttpServer().on('close', () => {
     store.close();
     void pool.end();

@@ -101,6 +101,7 @@ export const pastEstimate = z.object({
 export type PastEstimate = z.infer<typeof pastEstimate>;
 export const pastEstimatePage = pageOf(pastEstimate);
 export const pastEstimateQuery = pageQuery;
+export type PastEstimateQuery = z.infer<typeof pastEstimateQuery>;
 
 /** GET /api/chains/:id/usage: distance since the last treatment and before, for the chart. */
 export const usage = z.object({

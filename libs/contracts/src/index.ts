@@ -11,5 +11,6 @@ export * from './riders';
 export * from './rides';
 export * from './trade';
 export * from './treatments';
+export * from './words';
 export * from './workload';
 export * from './workshop';

@@ -34,4 +34,20 @@ export class MailService {
     await this.queue.send('send-mail', { mailId: mail.id, ...scope });
     return mail.id;
   }
+
+  /** Keeps a letter from leaving; false when it has left or is leaving. */
+  async withhold(mailId: string): Promise<boolean> {
+    const { affected } = await this.db.manager.update(
+      Mail,
+      { id: mailId, state: 'waiting' },
+      { state: 'withheld' },
+    );
+    return affected === 1;
+  }
+
+  /** Lets a withheld letter go. */
+  async letGo(mailId: string, scope: Scope): Promise<void> {
+    await this.db.manager.update(Mail, { id: mailId, state: 'withheld' }, { state: 'waiting' });
+    await this.queue.send('send-mail', { mailId, ...scope });
+  }
 }

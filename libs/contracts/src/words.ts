@@ -1,0 +1,68 @@
+import type { DueWindow, Reason } from './estimates';
+
+const part = (day: string, options: Intl.DateTimeFormatOptions) =>
+  new Intl.DateTimeFormat('en-GB', { ...options, timeZone: 'UTC' }).format(new Date(`${day}T00:00:00Z`));
+
+/** '17 March', with the year where it is not this one. */
+export function dayWords(day: string, today: string): string {
+  const year = day.slice(0, 4) === today.slice(0, 4) ? {} : ({ year: 'numeric' } as const);
+  return part(day, { day: 'numeric', month: 'long', ...year });
+}
+
+/** '11–24 March' or '28 March – 4 April'. */
+export function spanWords(from: string, to: string, today: string): string {
+  if (from === to) return dayWords(from, today);
+  if (from.slice(0, 7) === to.slice(0, 7)) return `${Number(from.slice(8))}–${dayWords(to, today)}`;
+  return `${dayWords(from, today)} – ${dayWords(to, today)}`;
+}
+
+/** A window as a sentence part: 'likely 11–24 March, most likely 17 March'. */
+export function windowWords(
+  { p10, p50, p90 }: Pick<DueWindow, 'p10' | 'p50' | 'p90'>,
+  today: string,
+): string {
+  if (p10 === null) return 'not within the next two years';
+  if (p90 !== null && p90 <= today) return 'due now';
+  const from = p10 <= today ? today : p10;
+  const median =
+    p50 === null ? '' : p50 <= today ? ', most likely now' : `, most likely ${dayWords(p50, today)}`;
+  if (p90 === null) return `from ${dayWords(from, today)} on${median}`;
+  return `likely ${p10 <= today ? 'between now and ' + dayWords(p90, today) : spanWords(from, p90, today)}${median}`;
+}
+
+const NUMBERS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten'];
+const count = (n: number, one: string, many: string) => `${NUMBERS[n] ?? n} ${n === 1 ? one : many}`;
+const km = (n: number | undefined) => `${Math.round(n ?? 0)} km`;
+
+/** What happened, without what it did to the window. */
+const CAUSES: Record<Reason['code'], (data: Reason['data']) => string> = {
+  'riding-more': ({ km: ridden, usual }) =>
+    `more riding than usual (${km(ridden)} instead of about ${km(usual)})`,
+  'riding-less': ({ km: ridden, usual }) =>
+    `less riding than usual (${km(ridden)} instead of about ${km(usual)})`,
+  'wet-rides': ({ rides, km: ridden }) =>
+    `${count(rides ?? 0, 'wet ride', 'wet rides')} (${km(ridden)}, which count for more)`,
+  'rough-rides': ({ rides, km: ridden }) =>
+    `${count(rides ?? 0, 'ride', 'rides')} off the road (${km(ridden)}, which count for more)`,
+  reading: ({ readings }) => count(readings ?? 1, 'new chain-checker reading', 'new chain-checker readings'),
+  treatment: () => 'the treatment that was given',
+  'planned-riding': ({ km: planned }) => `${km(planned)} of planned riding`,
+  'unlogged-distance': ({ km: missing }) => `${km(missing)} on the odometer that nobody logged`,
+  'quiet-log': () => 'a log that has gone quiet, so that the riding is a guess',
+  'calendar-limit': () => 'the calendar: a treatment is redone after so many days, however little was ridden',
+  'first-estimate': () => 'the first estimate from what is known so far',
+  'new-chain': () => 'a new chain',
+};
+
+const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
+
+/** One reason as a sentence: 'Two wet rides (74 km, which count for more) moved it 6 days earlier.' */
+export function reasonWords({ code, days, data }: Reason): string {
+  if (code === 'first-estimate') return 'This is the first estimate, from what is known so far.';
+  if (code === 'calendar-limit')
+    return 'The calendar decides: a treatment is redone after so many days, however little was ridden.';
+  const cause = capital(CAUSES[code](data));
+  const size = Math.abs(Math.round(days));
+  if (size === 0) return `${cause} did not move it.`;
+  return `${cause} moved it ${count(size, 'day', 'days')} ${days < 0 ? 'earlier' : 'later'}.`;
+}
