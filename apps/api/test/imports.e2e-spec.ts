@@ -185,6 +185,8 @@ describe('what cannot be taken in', () => {
       '20 MB',
     );
     await browser.post('/api/imports').field({ bikeId: bike.id }).expect(422);
+    const broken = browser.post('/api/imports').set('Content-Type', 'multipart/form-data; boundary=x');
+    expect((await broken.send('--x\r\nContent-Dis').expect(400)).body.detail).toContain('broke off');
     await send('x', 'x.csv', { bikeId: bike.id, chainId: chain.id }).expect(400);
     await send('x', 'x.csv', {}).expect(400);
     await browser

@@ -77,6 +77,16 @@ describe('readings', () => {
     expect((await readings()).total).toBe(0);
   });
 
+  it('are kept once, however often and at once they are sent under one key', async () => {
+    const send = (by: Browser) => by.post('/api/readings').set('Idempotency-Key', 'cellar-1').send(reading());
+    const answers = await Promise.all([send(browser), send(browser)]);
+    answers.push(await send(browser));
+    expect(answers.map(({ status }) => status)).toEqual([201, 201, 201]);
+    expect(new Set(answers.map(({ body }) => body.id)).size).toBe(1);
+    await send(mechanic).expect(201);
+    expect((await readings()).total).toBe(2);
+  });
+
   it.each([
     ['40 %', { values: [40] }, 400],
     ['far too short', { values: [-0.5] }, 400],

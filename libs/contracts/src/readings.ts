@@ -43,6 +43,7 @@ const holdToRules = (measured: Measurement, context: z.RefinementCtx) => {
 
 /** A number reading has 1 to 5 places (% elongation); a go/no-go reading has what goes and what does not. */
 export const measurement = measurementShape.superRefine(holdToRules);
+/** POST /api/readings may carry an Idempotency-Key header: sent twice, it is kept once. */
 export const readingInput = measurementShape
   .extend({ chainId: id, day, baseline: z.boolean().default(false), notes: notes.default('') })
   .superRefine(holdToRules);

@@ -1,4 +1,4 @@
-import { Body, Controller, Delete, Get, Param, Post, Query, SerializeOptions } from '@nestjs/common';
+import { Body, Controller, Delete, Get, Headers, Param, Post, Query, SerializeOptions } from '@nestjs/common';
 import { done, id, reading, readingInput, readingPage, readingQuery } from '@halfpitch/contracts';
 import type { Done, Page, Reading, ReadingInput, ReadingQuery } from '@halfpitch/contracts';
 import { Who } from '../common/actor';
@@ -20,8 +20,12 @@ export class ReadingsController {
   @Post()
   @Permit('readings.write')
   @SerializeOptions({ schema: reading })
-  create(@Who() actor: Actor, @Body({ schema: readingInput }) input: ReadingInput): Promise<Reading> {
-    return this.readings.create(actor, input);
+  create(
+    @Who() actor: Actor,
+    @Body({ schema: readingInput }) input: ReadingInput,
+    @Headers('idempotency-key') key?: string,
+  ): Promise<Reading> {
+    return this.readings.create(actor, input, key);
   }
 
   @Delete(':id')

@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { Page, Reading as WireReading, ReadingInput, ReadingQuery } from '@halfpitch/contracts';
+import { v5, v7 } from 'uuid';
 import { ChainChanges } from '../chains/chain-changes';
 import { Chain } from '../chains/chain.entity';
 import { ChainsService } from '../chains/chains.service';
@@ -46,12 +47,18 @@ export class ReadingsService {
     return pageOf(query, page, toReading);
   }
 
-  async create(actor: Actor, input: ReadingInput): Promise<WireReading> {
+  /** Keeps a reading; sent again under the same key, the first is kept and answered. */
+  async create(actor: Actor, input: ReadingInput, key?: string): Promise<WireReading> {
     const chain = await this.chains.reach(actor, input.chainId);
     const wrong = wrongReadingDay(input.day, chain, this.clock.today(actor.timeZone));
     if (wrong) throw unprocessable('day', wrong);
     const { values, lower, upper, ...rest } = input;
+    const { manager } = this.db;
+    const id = key ? v5(`${actor.accountId} ${key}`, chain.id) : v7();
+    const kept = await manager.findOneBy(Reading, { id });
+    if (kept) return toReading(kept);
     const reading = Object.assign(new Reading(), rest, {
+      id,
       workshopId: actor.workshopId,
       valuesPct: values,
       lowerPct: lower,
@@ -59,7 +66,7 @@ export class ReadingsService {
       byName: actor.name,
       byAccountId: actor.accountId,
     });
-    await this.db.manager.insert(Reading, reading);
+    await manager.createQueryBuilder().insert().into(Reading).values(reading).orIgnore().execute();
     await this.changes.changed(chain.id);
     return toReading(reading);
   }

@@ -9,8 +9,13 @@ const upload = multer({
   defParamCharset: 'utf8',
 }).single('file');
 
-function problem(error: unknown): unknown {
-  if (!(error instanceof MulterError)) return error;
+function problem(error: unknown): ProblemException {
+  if (!(error instanceof MulterError))
+    return new ProblemException(
+      400,
+      'Please check what you entered',
+      'The upload broke off. Send the file again.',
+    );
   if (error.code === 'LIMIT_FILE_SIZE')
     return new ProblemException(
       413,
