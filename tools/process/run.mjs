@@ -3,12 +3,21 @@ import { spawnBound } from './bound-child.mjs';
 
 const running = new Set();
 
+/** Ends a command with the processes it started itself. */
+function endGroup(child) {
+  try {
+    process.kill(-child.pid, 'SIGTERM');
+  } catch {
+    child.kill('SIGTERM');
+  }
+}
+
 /**
  * Runs a command to its end. Its output is returned and, with `log`, appended to that file as it comes;
- * `onLine` sees each line of stdout.
+ * `onLine` sees each line of stdout; `giveUp`, asked every second, ends the command by saying yes.
  * @returns {Promise<{ code: number | null, stdout: string, stderr: string }>}
  */
-export function run(command, args, { log, input, onLine, ...options } = {}) {
+export function run(command, args, { log, input, onLine, giveUp, ...options } = {}) {
   return new Promise((resolve) => {
     const stdin = input === undefined ? 'ignore' : 'pipe';
     const child = spawnBound(command, args, { stdio: [stdin, 'pipe', 'pipe'], ...options });
@@ -26,7 +35,9 @@ export function run(command, args, { log, input, onLine, ...options } = {}) {
     child.stdout.setEncoding('utf8').on('data', take('stdout'));
     child.stderr.setEncoding('utf8').on('data', take('stderr'));
     if (input !== undefined) child.stdin.on('error', () => undefined).end(input);
+    const asking = giveUp && setInterval(() => giveUp() && endGroup(child), 1_000);
     const settle = (code) => {
+      clearInterval(asking);
       running.delete(child);
       resolve({ code, ...text });
     };
@@ -40,13 +51,7 @@ export function run(command, args, { log, input, onLine, ...options } = {}) {
 
 /** Ends every command that `run` still waits for, with the processes it started itself. */
 export function endRunning() {
-  for (const child of running) {
-    try {
-      process.kill(-child.pid, 'SIGTERM');
-    } catch {
-      child.kill('SIGTERM');
-    }
-  }
+  for (const child of running) endGroup(child);
 }
 
 /** The last line with something in it. */

@@ -25,6 +25,7 @@ export function countsFrom(file, read, code) {
   if (!existsSync(file)) return { passed: 0, failed: 1, skipped: 0, note: 'no report' };
   const counts = read(JSON.parse(readFileSync(file, 'utf8')));
   if (counts.passed + counts.failed === 0) return { ...counts, failed: 1, note: 'no test was run' };
-  if (code !== 0 && counts.failed === 0) return { ...counts, failed: 1, note: `ended with ${code}` };
+  if (code !== 0 && counts.failed === 0)
+    return { ...counts, failed: 1, note: code === null ? 'did not end by itself' : `ended with ${code}` };
   return counts;
 }

@@ -1,4 +1,4 @@
-import { mkdirSync, rmSync } from 'node:fs';
+import { existsSync, mkdirSync, rmSync, statSync } from 'node:fs';
 import { join } from 'node:path';
 import { run } from '../process/run.mjs';
 import { prepareBuild } from '../start/prepare.mjs';
@@ -17,12 +17,23 @@ export async function build({ root, dist, log }) {
   return { ...one(0), note: await prepareBuild(root, { out: dist, log }) };
 }
 
+const patience = { inAllMs: 15 * 60_000, afterReportMs: 30_000 };
+
+/** Says yes once a runner has taken far too long, or has reported and still does not end. */
+function impatience(report) {
+  const since = Date.now();
+  const hasLingered = () =>
+    existsSync(report) && Date.now() - statSync(report).mtimeMs > patience.afterReportMs;
+  return () => Date.now() - since > patience.inAllMs || hasLingered();
+}
+
 async function runner(context, { program, args, env, report, read }) {
   mkdirSync(join(report, '..'), { recursive: true });
   rmSync(report, { force: true });
   const { code } = await run(join(context.root, 'node_modules/.bin', program), args, {
     cwd: context.root,
     log: context.log,
+    giveUp: impatience(report),
     env: { ...process.env, NODE_ENV: 'test', FORCE_COLOR: '0', ...env },
   });
   return countsFrom(report, read, code);
