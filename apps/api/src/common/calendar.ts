@@ -1,5 +1,8 @@
 import { unprocessable } from './problems';
 
+/** Calendar days as the estimation library counts them, whole days since 1970-01-01, and back. */
+export { dayOf as dayNumber, isoDay as dayOfNumber } from '@halfpitch/estimation';
+
 /** A day that has not come yet cannot have been lived: refused, naming the field. */
 export function refuseFuture(day: string, today: string, path = 'day'): void {
   if (day > today) throw unprocessable(path, `${day} is still to come; today is ${today}.`);

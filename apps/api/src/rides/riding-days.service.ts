@@ -1,11 +1,11 @@
 import { Injectable } from '@nestjs/common';
 import type { RidingDay, RidingDayQuery, RidingDays, Surface, Weather } from '@halfpitch/contracts';
-import { dayOf, rideFactor } from '@halfpitch/estimation';
+import { rideFactor } from '@halfpitch/estimation';
 import type { Factors } from '@halfpitch/estimation';
 import { BikesService } from '../bikes/bikes.service';
 import { ChainsService } from '../chains/chains.service';
 import type { Actor } from '../common/actor';
-import { yearsBefore } from '../common/calendar';
+import { dayNumber, yearsBefore } from '../common/calendar';
 import { Clock } from '../common/clock';
 import { unprocessable } from '../common/problems';
 import { TenantDb } from '../database/tenant-db';
@@ -23,7 +23,7 @@ interface RiddenRow {
 /** Adds one row to its day; rows come in order of their days. */
 function addTo(days: RidingDay[], row: RiddenRow, factors: Factors): RidingDay[] {
   const { day, distanceM, surface, weather } = row;
-  const { lube, wear } = rideFactor({ day: dayOf(day), surface, weather }, factors);
+  const { lube, wear } = rideFactor({ day: dayNumber(day), surface, weather }, factors);
   if (days.at(-1)?.day !== day) days.push({ day, distanceM: 0, lubeM: 0, wearM: 0 });
   const sum = days.at(-1)!;
   sum.distanceM += distanceM;
