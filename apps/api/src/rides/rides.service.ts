@@ -113,7 +113,8 @@ export class RidesService {
   /** Concerned are the chain that was ridden and, since the forecast learns from the bike's riding, the one on it now. */
   private async told(actor: Actor, ...rides: Pick<Ride, 'bikeId' | 'chainId'>[]): Promise<void> {
     const today = this.clock.today(actor.timeZone);
-    const now = await Promise.all(rides.map(({ bikeId }) => this.rideChains.chainOn(bikeId, today)));
-    await this.changes.changed(...rides.map(({ chainId }) => chainId), ...now);
+    const chains = rides.map(({ chainId }) => chainId);
+    for (const { bikeId } of rides) chains.push(await this.rideChains.chainOn(bikeId, today));
+    await this.changes.changed(...chains);
   }
 }
