@@ -1,5 +1,40 @@
+import { HttpStatus, RequestMethod } from '@nestjs/common';
+import { ModulesContainer } from '@nestjs/core';
 import type { NestExpressApplication } from '@nestjs/platform-express';
-import { DocumentBuilder, SwaggerModule } from '@nestjs/swagger';
+import { ApiResponse, DocumentBuilder, SwaggerModule } from '@nestjs/swagger';
+import { problem } from '@halfpitch/contracts';
+import type { z } from 'zod';
+
+type Handler = (...args: unknown[]) => unknown;
+
+/** What @SerializeOptions, @HttpCode and the method decorators left on a handler. */
+const noted = (handler: Handler) => ({
+  schema: (Reflect.getMetadata('class_serializer:options', handler) as { schema?: z.ZodType } | undefined)
+    ?.schema,
+  status: Reflect.getMetadata('__httpCode__', handler) as HttpStatus | undefined,
+  method: Reflect.getMetadata('method', handler) as RequestMethod | undefined,
+});
+
+/** Every handler's answer is documented by the schema that its answer is held to. */
+function documentAnswers(app: NestExpressApplication): void {
+  const controllers = [...app.get(ModulesContainer).values()].flatMap((module) => [
+    ...module.controllers.values(),
+  ]);
+  for (const { metatype } of controllers) {
+    const prototype = (metatype as { prototype?: object } | null)?.prototype ?? {};
+    for (const [name, descriptor] of Object.entries(Object.getOwnPropertyDescriptors(prototype))) {
+      if (typeof descriptor.value !== 'function' || name === 'constructor') continue;
+      const { schema, status, method } = noted(descriptor.value as Handler);
+      if (!schema || method === undefined) continue;
+      const usual = method === RequestMethod.POST ? HttpStatus.CREATED : HttpStatus.OK;
+      ApiResponse({ status: status ?? usual, description: 'Done.', standardSchema: schema })(
+        prototype,
+        name,
+        descriptor,
+      );
+    }
+  }
+}
 
 /** The API's OpenAPI document at /api/docs/openapi.json and a page to browse it at /api/docs, from the same schemas. */
 export function mountDocs(app: NestExpressApplication): void {
@@ -10,8 +45,15 @@ export function mountDocs(app: NestExpressApplication): void {
     )
     .setVersion('1')
     .addCookieAuth('halfpitch')
+    .addGlobalResponse({
+      status: 'default',
+      description: 'What went wrong, as problem details (RFC 9457).',
+      standardSchema: problem,
+    })
     .build();
-  SwaggerModule.setup('api/docs', app, () => SwaggerModule.createDocument(app, config), {
-    jsonDocumentUrl: 'api/docs/openapi.json',
-  });
+  const document = () => {
+    documentAnswers(app);
+    return SwaggerModule.createDocument(app, config);
+  };
+  SwaggerModule.setup('api/docs', app, document, { jsonDocumentUrl: 'api/docs/openapi.json' });
 }

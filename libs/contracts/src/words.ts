@@ -31,36 +31,38 @@ export function windowWords(
 }
 
 const NUMBERS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten'];
-const count = (n: number, one: string, many: string) => `${NUMBERS[n] ?? n} ${n === 1 ? one : many}`;
+const count = (n = 1, one: string, many: string) => `${NUMBERS[n] ?? n} ${n === 1 ? one : many}`;
 const km = (n: number | undefined) => `${Math.round(n ?? 0)} km`;
 
+const SENTENCES = {
+  'first-estimate': 'This is the first estimate, from what is known so far.',
+  'calendar-limit':
+    'The calendar decides: a treatment is redone after so many days, however little was ridden.',
+  'quiet-log': 'The log has gone quiet, so the riding ahead is a guess.',
+  'new-chain': 'The chain is new.',
+} as const;
+type Cause = Exclude<Reason['code'], keyof typeof SENTENCES>;
+
 /** What happened, without what it did to the window. */
-const CAUSES: Record<Reason['code'], (data: Reason['data']) => string> = {
-  'riding-more': ({ km: ridden, usual }) =>
-    `more riding than usual (${km(ridden)} instead of about ${km(usual)})`,
-  'riding-less': ({ km: ridden, usual }) =>
-    `less riding than usual (${km(ridden)} instead of about ${km(usual)})`,
-  'wet-rides': ({ rides, km: ridden }) =>
-    `${count(rides ?? 0, 'wet ride', 'wet rides')} (${km(ridden)}, which count for more)`,
-  'rough-rides': ({ rides, km: ridden }) =>
-    `${count(rides ?? 0, 'ride', 'rides')} off the road (${km(ridden)}, which count for more)`,
-  reading: ({ readings }) => count(readings ?? 1, 'new chain-checker reading', 'new chain-checker readings'),
-  treatment: () => 'the treatment that was given',
-  'planned-riding': ({ km: planned }) => `${km(planned)} of planned riding`,
-  'unlogged-distance': ({ km: missing }) => `${km(missing)} on the odometer that nobody logged`,
-  'quiet-log': () => 'a log that has gone quiet, so that the riding is a guess',
-  'calendar-limit': () => 'the calendar: a treatment is redone after so many days, however little was ridden',
-  'first-estimate': () => 'the first estimate from what is known so far',
-  'new-chain': () => 'a new chain',
+const CAUSES: Record<Cause, (data: Reason['data']) => string> = {
+  'riding-more': (data) => `More riding than usual (${km(data.km)} instead of about ${km(data.usual)})`,
+  'riding-less': (data) => `Less riding than usual (${km(data.km)} instead of about ${km(data.usual)})`,
+  'wet-rides': (data) =>
+    `${count(data.rides, 'wet ride', 'wet rides')} (${km(data.km)}, which count for more)`,
+  'rough-rides': (data) =>
+    `${count(data.rides, 'ride', 'rides')} off the road (${km(data.km)}, which count for more)`,
+  reading: (data) => count(data.readings, 'new chain-checker reading', 'new chain-checker readings'),
+  treatment: () => 'The treatment that was given',
+  'planned-riding': (data) => `${km(data.km)} of planned riding`,
+  'unlogged-distance': (data) => `${km(data.km)} on the odometer that nobody logged`,
 };
 
+const isWhole = (code: Reason['code']): code is keyof typeof SENTENCES => code in SENTENCES;
 const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
 
-/** One reason as a sentence: 'Two wet rides (74 km, which count for more) moved it 6 days earlier.' */
+/** One reason as a sentence: 'Two wet rides (74 km, which count for more) moved it six days earlier.' */
 export function reasonWords({ code, days, data }: Reason): string {
-  if (code === 'first-estimate') return 'This is the first estimate, from what is known so far.';
-  if (code === 'calendar-limit')
-    return 'The calendar decides: a treatment is redone after so many days, however little was ridden.';
+  if (isWhole(code)) return SENTENCES[code];
   const cause = capital(CAUSES[code](data));
   const size = Math.abs(Math.round(days));
   if (size === 0) return `${cause} did not move it.`;

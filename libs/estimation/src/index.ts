@@ -10,4 +10,4 @@ export { defaultFleetModel } from './fleet-model';
 export { defaultRidingModel, forecastRiding } from './riding';
 export { poissonBinomial } from './workload/poisson-binomial';
 export type { ChainChances, WeekLoad, WorkloadOptions } from './workload/workload';
-export { workload } from './workload/workload';
+export { withRenewals, workload } from './workload/workload';

@@ -1,6 +1,6 @@
 import { Controller, Get, Param, Query, SerializeOptions } from '@nestjs/common';
-import { chainEstimate, id, pageQuery, pastEstimatePage, usage } from '@halfpitch/contracts';
-import type { ChainEstimate, Page, PageQuery, PastEstimate, Usage } from '@halfpitch/contracts';
+import { chainEstimate, id, pastEstimatePage, pastEstimateQuery, usage } from '@halfpitch/contracts';
+import type { ChainEstimate, Page, PastEstimate, PastEstimateQuery, Usage } from '@halfpitch/contracts';
 import { Who } from '../common/actor';
 import type { Actor } from '../common/actor';
 import { Permit } from '../common/permit';
@@ -11,7 +11,7 @@ import { UsageService } from './usage.service';
 export class EstimatesController {
   constructor(
     private readonly estimates: EstimatesService,
-    private readonly usage: UsageService,
+    private readonly usages: UsageService,
   ) {}
 
   @Get('estimate')
@@ -27,7 +27,7 @@ export class EstimatesController {
   past(
     @Who() actor: Actor,
     @Param('id', { schema: id }) chainId: string,
-    @Query({ schema: pageQuery }) page: PageQuery,
+    @Query({ schema: pastEstimateQuery }) page: PastEstimateQuery,
   ): Promise<Page<PastEstimate>> {
     return this.estimates.past(actor, chainId, page);
   }
@@ -35,7 +35,7 @@ export class EstimatesController {
   @Get('usage')
   @Permit('estimates.read')
   @SerializeOptions({ schema: usage })
-  usageSince(@Who() actor: Actor, @Param('id', { schema: id }) chainId: string): Promise<Usage> {
-    return this.usage.read(actor, chainId);
+  usage(@Who() actor: Actor, @Param('id', { schema: id }) chainId: string): Promise<Usage> {
+    return this.usages.read(actor, chainId);
   }
 }

@@ -1,20 +1,21 @@
 import { Injectable } from '@nestjs/common';
-import type { ChainEstimate, Page, PageQuery, PastEstimate } from '@halfpitch/contracts';
+import type { ChainEstimate, Page, PastEstimate, PastEstimateQuery } from '@halfpitch/contracts';
 import { ChainsService } from '../chains/chains.service';
 import type { Actor } from '../common/actor';
 import { pageOf } from '../common/paging';
+import { ProblemException } from '../common/problems';
 import { TenantDb } from '../database/tenant-db';
-import { WorkshopService } from '../workshop/workshop.service';
-import { EstimateChainsService } from './estimate-chains.service';
 import { Estimate } from './estimate.entity';
+import { Estimator } from './estimator.service';
 
 function toEstimate({ id, chainId, madeAt, detail }: Estimate): ChainEstimate {
-  return { ...detail, id, chainId, madeAt: madeAt.toISOString() };
+  const { weekly, ...told } = detail;
+  return { ...told, id, chainId, madeAt: new Date(madeAt).toISOString() };
 }
 
-function toPastEstimate(estimate: Estimate): PastEstimate {
-  const { id, madeAt, shareUsed, lubrication, replacement } = toEstimate(estimate);
-  return { id, madeAt, shareUsed, lubrication, replacement };
+function toPast({ id, madeAt, detail }: Estimate): PastEstimate {
+  const { shareUsed, lubrication, replacement } = detail;
+  return { id, madeAt: madeAt.toISOString(), shareUsed, lubrication, replacement };
 }
 
 @Injectable()
@@ -22,30 +23,34 @@ export class EstimatesService {
   constructor(
     private readonly db: TenantDb,
     private readonly chains: ChainsService,
-    private readonly workshop: WorkshopService,
-    private readonly making: EstimateChainsService,
+    private readonly estimator: Estimator,
   ) {}
 
-  /** The newest estimate; a chain that has none yet is estimated on the spot. */
+  /** The newest estimate; made on the spot where there is none yet. */
   async current(actor: Actor, chainId: string): Promise<ChainEstimate> {
-    await this.chains.reach(actor, chainId);
+    const chain = await this.chains.reach(actor, chainId);
     const kept = await this.newest(chainId);
     if (kept) return toEstimate(kept);
-    await this.making.estimate(await this.workshop.current(actor.workshopId), [chainId]);
-    return toEstimate((await this.newest(chainId))!);
+    const [made] = await this.estimator.estimate(actor.workshopId, [chainId]);
+    if (made) return toEstimate(made);
+    const detail = chain.retiredOn
+      ? `It was retired on ${chain.retiredOn}, before anything was estimated.`
+      : 'What is recorded of this chain cannot be right: check its rides and readings.';
+    throw new ProblemException(409, 'No estimate', detail);
   }
 
-  /** What was believed when, the newest first. */
-  async past(actor: Actor, chainId: string, page: PageQuery): Promise<Page<PastEstimate>> {
+  /** What was believed when, newest first. */
+  async past(actor: Actor, chainId: string, page: PastEstimateQuery): Promise<Page<PastEstimate>> {
     await this.chains.reach(actor, chainId);
     const query = this.db.manager
       .createQueryBuilder(Estimate, 'estimate')
       .where('estimate.chainId = :chainId', { chainId })
       .orderBy('estimate.madeOn', 'DESC');
-    return pageOf(query, page, toPastEstimate);
+    return pageOf(query, page, toPast);
   }
 
-  private newest(chainId: string): Promise<Estimate | null> {
+  /** The newest estimate that is kept. */
+  newest(chainId: string): Promise<Estimate | null> {
     return this.db.manager.findOne(Estimate, { where: { chainId }, order: { madeOn: 'DESC' } });
   }
 }

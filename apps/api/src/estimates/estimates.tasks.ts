@@ -3,27 +3,19 @@ import { Clock } from '../common/clock';
 import { TenantDb } from '../database/tenant-db';
 import { QueueService } from '../jobs/queue.service';
 import type { Tasks } from '../jobs/tasks';
-import { Workshop } from '../workshop/workshop.entity';
-import { EstimateChainsService } from './estimate-chains.service';
+import { WorkshopService } from '../workshop/workshop.service';
+import { Estimator } from './estimator.service';
 
-/** Chains estimated in one transaction: enough that queries cost little, few enough that memory stays small. */
+/** How many chains are loaded, estimated and kept in one transaction: bounds the memory, and what a crash undoes. */
 const BATCH = 200;
-
-/** Chains in service that have no estimate of today yet, those of one bike together. */
-const NEXT = `
-  select chain.id from chain
-  left join fitting on fitting.chain_id = chain.id and fitting.to_day is null
-  where chain.retired_on is null
-    and not exists (select 1 from estimate where chain_id = chain.id and made_on = $1 and made_at >= $2)
-  order by chain.rider_id, fitting.bike_id, chain.id
-  limit ${BATCH}`;
 
 @Injectable()
 export class EstimatesTasks implements OnModuleInit {
   constructor(
     private readonly db: TenantDb,
     private readonly queue: QueueService,
-    private readonly estimates: EstimateChainsService,
+    private readonly workshops: WorkshopService,
+    private readonly estimator: Estimator,
     private readonly clock: Clock,
   ) {}
 
@@ -33,30 +25,44 @@ export class EstimatesTasks implements OnModuleInit {
   }
 
   async estimateChain({ workshopId, chainId }: Tasks['estimate-chain']): Promise<void> {
-    await this.db.run({ workshopId }, async () => {
-      const [workshop] = await this.db.manager.find(Workshop, { where: { id: workshopId } });
-      if (workshop) await this.estimates.estimate(workshop, [chainId]);
-    });
+    await this.db.run({ workshopId }, () => this.estimator.estimate(workshopId, [chainId]));
   }
 
-  /** The night's work: every chain in service, batch by batch, each batch in a transaction of its own. */
+  /**
+   * Estimates every chain in service that has no estimate of today. What was done stays done, batch by batch: begun
+   * again after a crash, or beside another, it goes on with what is left.
+   */
   async estimateWorkshop({ workshopId }: Tasks['estimate-workshop']): Promise<void> {
-    const began = this.clock.now();
-    while (await this.db.run({ workshopId }, () => this.nextBatch(workshopId, began)));
+    const today = await this.db.run({ workshopId }, async () => {
+      const { timeZone } = await this.workshops.current(workshopId);
+      return this.clock.today(timeZone);
+    });
+    let ids: string[] = [];
+    do {
+      ids = await this.db.run({ workshopId }, async () => {
+        const next = await this.nextBatch(today, ids.at(-1));
+        if (next.length > 0) await this.estimator.estimate(workshopId, next);
+        return next;
+      });
+    } while (ids.length === BATCH);
+    await this.db.run({ workshopId }, () => this.finish(workshopId, today));
   }
 
-  /** Estimates the next batch; the last one marks the day as done. */
-  private async nextBatch(workshopId: string, began: Date): Promise<boolean> {
-    const workshop = await this.db.manager.findOneByOrFail(Workshop, { id: workshopId });
-    const today = this.clock.today(workshop.timeZone);
-    const chains = await this.db.manager.query<{ id: string }[]>(NEXT, [today, began]);
-    if (chains.length > 0)
-      await this.estimates.estimate(
-        workshop,
-        chains.map(({ id }) => id),
-      );
-    if (chains.length === BATCH) return true;
-    await this.db.manager.update(Workshop, workshopId, { estimatedOn: today });
-    return false;
+  private async nextBatch(today: string, after = '00000000-0000-0000-0000-000000000000'): Promise<string[]> {
+    const rows = await this.db.manager.query<{ id: string }[]>(
+      `select id from chain
+        where retired_on is null and id > $1
+          and not exists (select from estimate where chain_id = chain.id and made_on = $2)
+        order by id limit ${BATCH}`,
+      [after, today],
+    );
+    return rows.map(({ id }) => id);
+  }
+
+  private finish(workshopId: string, today: string): Promise<unknown> {
+    return this.db.manager.query(
+      `update workshop set estimated_on = $2 where id = $1 and (estimated_on is null or estimated_on < $2)`,
+      [workshopId, today],
+    );
   }
 }

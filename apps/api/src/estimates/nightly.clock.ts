@@ -19,7 +19,7 @@ export class NightlyClock {
     private readonly clock: Clock,
   ) {}
 
-  @Cron(CronExpression.EVERY_MINUTE)
+  @Cron(CronExpression.EVERY_10_MINUTES)
   async tick(): Promise<void> {
     if (this.config.get('ROLE') !== 'http') await this.askForNight();
   }

@@ -1,68 +1,74 @@
 import { Injectable } from '@nestjs/common';
-import type { Usage } from '@halfpitch/contracts';
-import { dayOf, equivalentKm, isoDay, Ride, Treatment } from '@halfpitch/estimation';
+import type { Surface, TreatmentKind, Usage, Weather } from '@halfpitch/contracts';
+import { dayOf, equivalentKm, Factors } from '@halfpitch/estimation';
 import { ChainsService } from '../chains/chains.service';
 import type { Actor } from '../common/actor';
 import { TenantDb } from '../database/tenant-db';
+import { Treatment } from '../treatments/treatment.entity';
 import { WorkshopService } from '../workshop/workshop.service';
-import { readRecords } from './chain-records';
-import { loadRides } from './ride-rows';
 
-type Factors = Parameters<typeof equivalentKm>[1];
+interface RiddenRow {
+  day: string;
+  surface: Surface;
+  weather: Weather;
+  metres: number;
+}
 type Cycle = Usage['cycles'][number];
 
-/** Distance since each treatment, for the chart of how the present one is being used up. */
+/** Adds one row to the cycle's running sums; rows come in order of their days. */
+function addTo(cycle: Cycle, { day, metres, surface, weather }: RiddenRow, factors: Factors): void {
+  const km = metres / 1000;
+  const { lubeKm } = equivalentKm({ day: dayOf(day), km, surface, weather }, factors);
+  const last = cycle.points.at(-1);
+  if (last?.day === day) {
+    last.km += km;
+    last.lubeKm += lubeKm;
+  } else {
+    cycle.points.push({ day, km: (last?.km ?? 0) + km, lubeKm: (last?.lubeKm ?? 0) + lubeKm });
+  }
+}
+
+/** Splits riding at the treatments; what was ridden on a treatment's day was ridden before it. */
+export function usageCycles(
+  inServiceOn: string,
+  treatments: readonly { id: string; day: string; kind: TreatmentKind }[],
+  ridden: readonly RiddenRow[],
+  factors: Factors,
+): Usage {
+  const starts = [{ id: null, day: inServiceOn, kind: null }, ...treatments];
+  const cycles = starts.map(({ id, day, kind }, i): Cycle => {
+    const to = starts[i + 1]?.day ?? null;
+    const cycle: Cycle = { treatmentId: id, kind, from: day, to, points: [] };
+    for (const row of ridden) {
+      const after = i === 0 || row.day > day;
+      if (after && (to === null || row.day <= to)) addTo(cycle, row, factors);
+    }
+    return cycle;
+  });
+  return { cycles };
+}
+
 @Injectable()
 export class UsageService {
   constructor(
     private readonly db: TenantDb,
     private readonly chains: ChainsService,
-    private readonly workshop: WorkshopService,
+    private readonly workshops: WorkshopService,
   ) {}
 
+  /** Distance since each treatment, by day. */
   async read(actor: Actor, chainId: string): Promise<Usage> {
     const chain = await this.chains.reach(actor, chainId);
-    const { settings } = await this.workshop.current(actor.workshopId);
-    const rides = (await loadRides(this.db.manager, [chainId], [])).ofChain.get(chainId) ?? [];
-    const { treatments } = await readRecords(this.db.manager, [chainId], []);
-    return {
-      cycles: toCycles(rides, treatments.get(chainId) ?? [], dayOf(chain.inServiceOn), settings.factors),
-    };
+    const { settings } = await this.workshops.current(actor.workshopId);
+    const treatments = await this.db.manager.find(Treatment, {
+      where: { chainId },
+      order: { day: 'ASC', id: 'ASC' },
+    });
+    const ridden = await this.db.manager.query<RiddenRow[]>(
+      `select day::text, surface, weather, sum(distance_m)::int as metres from ride
+        where chain_id = $1 group by day, surface, weather order by day`,
+      [chainId],
+    );
+    return usageCycles(chain.inServiceOn, treatments, ridden, settings.factors);
   }
-}
-
-/** Cuts a chain's rides at its treatments: one cycle for each, and one before the first where there was riding. */
-export function toCycles(
-  rides: Ride[],
-  treatments: Treatment[],
-  inServiceOn: number,
-  factors: Factors,
-): Cycle[] {
-  const starts = [{ id: null, kind: null, day: inServiceOn }, ...treatments];
-  const ordered = [...rides].sort((a, b) => a.day - b.day);
-  return starts
-    .map(({ id, kind, day }, i): Cycle => {
-      const next = starts[i + 1]?.day ?? Infinity;
-      const inCycle = ordered.filter((ride) => (i === 0 || ride.day > day) && ride.day <= next);
-      return {
-        treatmentId: id,
-        kind,
-        from: isoDay(day),
-        to: Number.isFinite(next) ? isoDay(next) : null,
-        points: cumulate(inCycle, day, factors),
-      };
-    })
-    .filter(({ treatmentId, points }) => treatmentId !== null || points.length > 1);
-}
-
-function cumulate(rides: Ride[], start: number, factors: Factors): Cycle['points'] {
-  let km = 0;
-  let lubeKm = 0;
-  const byDay = new Map([[isoDay(start), { km, lubeKm }]]);
-  for (const ride of rides) {
-    km += ride.km;
-    lubeKm += equivalentKm(ride, factors).lubeKm;
-    byDay.set(isoDay(ride.day), { km, lubeKm });
-  }
-  return [...byDay].map(([day, sums]) => ({ day, ...sums }));
 }

@@ -8,6 +8,8 @@ export interface LetterText {
   paragraphs: string[];
   link?: { label: string; url: string };
   closing: string;
+  /** A small link below everything. */
+  footer?: { label: string; url: string };
   headers?: Record<string, string>;
 }
 
@@ -21,11 +23,11 @@ export function writeLetter({
   paragraphs,
   link,
   closing,
+  footer,
   headers,
 }: LetterText): Letter {
-  const text = [greeting, ...paragraphs, ...(link ? [`${link.label}: ${link.url}`] : []), closing].join(
-    '\n\n',
-  );
+  const written = (to?: { label: string; url: string }) => (to ? [`${to.label}: ${to.url}`] : []);
+  const text = [greeting, ...paragraphs, ...written(link), closing, ...written(footer)].join('\n\n');
   const p = (inner: string, style = '') => `<p style="margin:0 0 16px;${style}">${inner}</p>`;
   const button = link
     ? p(
@@ -39,6 +41,7 @@ ${p(escape(greeting), 'font-size:18px')}
 ${paragraphs.map((paragraph) => p(escape(paragraph))).join('\n')}
 ${button}
 ${p(escape(closing).replaceAll('\n', '<br>'), 'color:#5b5e63;font-size:14px')}
+${footer ? p(`<a href="${escape(footer.url)}" style="color:#5b5e63">${escape(footer.label)}</a>`, 'font-size:14px') : ''}
 </div></body></html>`;
   return { to, subject, text: `${text}\n`, html, headers };
 }

@@ -30,7 +30,7 @@ export class Mail {
   headers: Record<string, string> = {};
 
   @Column('text')
-  state: 'waiting' | 'withheld' | 'sending' | 'sent' | 'failed' = 'waiting';
+  state: 'waiting' | 'sending' | 'sent' | 'failed' = 'waiting';
 
   @Column('integer')
   attempts: number = 0;

@@ -35,19 +35,9 @@ export class MailService {
     return mail.id;
   }
 
-  /** Keeps a letter from leaving; false when it has left or is leaving. */
-  async withhold(mailId: string): Promise<boolean> {
-    const { affected } = await this.db.manager.update(
-      Mail,
-      { id: mailId, state: 'waiting' },
-      { state: 'withheld' },
-    );
+  /** Takes a letter back; false when it has left or is leaving. */
+  async withdraw(mailId: string): Promise<boolean> {
+    const { affected } = await this.db.manager.delete(Mail, { id: mailId, state: 'waiting' });
     return affected === 1;
-  }
-
-  /** Lets a withheld letter go. */
-  async letGo(mailId: string, scope: Scope): Promise<void> {
-    await this.db.manager.update(Mail, { id: mailId, state: 'withheld' }, { state: 'waiting' });
-    await this.queue.send('send-mail', { mailId, ...scope });
   }
 }

@@ -2,7 +2,7 @@ import { Injectable, Logger, OnModuleInit } from '@nestjs/common';
 import { Clock } from '../common/clock';
 import { TenantDb } from '../database/tenant-db';
 import { QueueService } from '../jobs/queue.service';
-import type { Tasks } from '../jobs/tasks';
+import { QUEUES, Tasks } from '../jobs/tasks';
 import { Mail } from './mail.entity';
 import { MailTransport } from './transport';
 
@@ -42,9 +42,10 @@ export class MailTasks implements OnModuleInit {
       await this.transport.send(mail);
     } catch (error) {
       const unclear = isUnclear(error);
+      const over = unclear || mail.attempts >= QUEUES['send-mail'].retryLimit;
       const lastError = unclear ? UNCLEAR : (error as Error).message;
       await this.db.run(scope, () =>
-        this.db.manager.update(Mail, mailId, { state: unclear ? 'failed' : 'waiting', lastError }),
+        this.db.manager.update(Mail, mailId, { state: over ? 'failed' : 'waiting', lastError }),
       );
       this.logger.warn(`Letter ${mailId} was not sent: ${lastError}`);
       if (unclear) return;

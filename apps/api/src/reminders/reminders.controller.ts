@@ -1,4 +1,4 @@
-import { Body, Controller, Get, Param, Post, Query, SerializeOptions } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Post, Query, SerializeOptions } from '@nestjs/common';
 import { id, reminder, reminderPage, reminderQuery, sendReminder } from '@halfpitch/contracts';
 import type { Page, Reminder, ReminderQuery, SendReminder } from '@halfpitch/contracts';
 import { Who } from '../common/actor';
@@ -25,6 +25,7 @@ export class RemindersController {
   }
 
   @Post(':id/hold')
+  @HttpCode(200)
   @Permit('reminders.send')
   @SerializeOptions({ schema: reminder })
   hold(@Param('id', { schema: id }) reminderId: string): Promise<Reminder> {
@@ -32,9 +33,10 @@ export class RemindersController {
   }
 
   @Post(':id/release')
+  @HttpCode(200)
   @Permit('reminders.send')
   @SerializeOptions({ schema: reminder })
-  release(@Param('id', { schema: id }) reminderId: string): Promise<Reminder> {
-    return this.reminders.release(reminderId);
+  release(@Who() actor: Actor, @Param('id', { schema: id }) reminderId: string): Promise<Reminder> {
+    return this.reminders.release(actor, reminderId);
   }
 }

@@ -1,18 +1,16 @@
 import { Module } from '@nestjs/common';
-import { ChainsModule } from '../chains/chains.module';
 import { EstimatesModule } from '../estimates/estimates.module';
-import { TreatmentsModule } from '../treatments/treatments.module';
 import { WorkshopModule } from '../workshop/workshop.module';
-import { DueReminders } from './due-reminders';
+import { DueReminders } from './due-reminders.service';
+import { ReminderWriter } from './reminder-writer.service';
 import { RemindersController } from './reminders.controller';
 import { RemindersService } from './reminders.service';
 import { StopController } from './stop.controller';
 import { StopService } from './stop.service';
-import { WriteReminderService } from './write-reminder.service';
 
 @Module({
-  imports: [ChainsModule, EstimatesModule, TreatmentsModule, WorkshopModule],
+  imports: [EstimatesModule, WorkshopModule],
   controllers: [RemindersController, StopController],
-  providers: [DueReminders, RemindersService, StopService, WriteReminderService],
+  providers: [DueReminders, ReminderWriter, RemindersService, StopService],
 })
 export class RemindersModule {}

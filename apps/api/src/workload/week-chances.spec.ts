@@ -1,20 +1,37 @@
-import { chainsOfWeek, shiftWeeks } from './week-chances';
+import { chainsOfWeek, mondayOf, shiftWeeks } from './week-chances';
+
+const sum = (chances: number[]) => chances.reduce((total, p) => total + p, 0);
+
+describe('mondayOf', () => {
+  it.each([
+    ['2026-11-30', '2026-11-30'],
+    ['2026-12-01', '2026-11-30'],
+    ['2026-12-06', '2026-11-30'],
+    ['2026-12-07', '2026-12-07'],
+  ])('%s is in the week of %s', (day, monday) => {
+    const count = (iso: string) => Date.parse(iso) / 86_400_000;
+    expect(mondayOf(count(day))).toBe(count(monday));
+  });
+});
 
 describe('shiftWeeks', () => {
   const weekly = [0.1, 0.2, 0.3, 0.4];
 
-  it('leaves chances of an estimate made today as they are', () => {
-    expect(shiftWeeks(weekly, 100, 100, 3).map((p) => p.toFixed(6))).toEqual([
-      '0.100000',
-      '0.200000',
-      '0.300000',
-    ]);
+  it('leaves the chances of an estimate made on that Monday as they are', () => {
+    shiftWeeks(weekly, 100, 100, 3).forEach((p, w) => expect(p).toBeCloseTo(weekly[w]!, 12));
   });
 
-  it('counts what fell due since as due now, and loses nothing', () => {
+  it('counts what fell due before as due in the first week, and loses nothing', () => {
     const shifted = shiftWeeks(weekly, 100, 107, 3);
-    expect(shifted[0]).toBeCloseTo(0.3);
-    expect(shifted.reduce((sum, p) => sum + p, 0)).toBeCloseTo(1);
+    expect(shifted[0]).toBeCloseTo(0.3, 12);
+    expect(sum(shifted)).toBeCloseTo(1, 12);
+  });
+
+  it('spreads a week that straddles a Monday over both', () => {
+    const shifted = shiftWeeks(weekly, 103, 100, 5);
+    expect(shifted[0]).toBeCloseTo((4 / 7) * 0.1, 12);
+    expect(shifted[1]).toBeCloseTo((3 / 7) * 0.1 + (4 / 7) * 0.2, 12);
+    expect(sum(shifted)).toBeCloseTo(1, 12);
   });
 });
 
@@ -24,6 +41,7 @@ describe('chainsOfWeek', () => {
       chainId,
       label: 'A',
       riderName: 'R',
+      dipped: true,
       lubrication: [chance],
       replacement: [0],
     });

@@ -3,6 +3,8 @@ export interface ChainChance {
   chainId: string;
   label: string;
   riderName: string;
+  /** Its treatment is a dip into the pot. */
+  dipped: boolean;
   lubrication: number[] | null;
   replacement: number[];
 }
@@ -10,22 +12,29 @@ export interface ChainChance {
 const MOST_CHAINS = 20;
 const WORTH_NAMING = 0.05;
 
+/** The Monday of the week that a day falls in; days are counted since 1970-01-01, a Thursday. */
+export const mondayOf = (day: number): number => day - ((day + 3) % 7);
+
 /**
- * Weekly chances counted from the day an estimate was made, as weeks from today: what fell due before today is due in
- * the first week; within an old week the chance is spread evenly.
+ * Weekly chances counted from the day an estimate was made, as calendar weeks from `monday`: what fell due before is
+ * due in the first week; within a week of the estimate's own the chance is spread evenly.
  */
 export function shiftWeeks(
   weekly: readonly number[],
   madeOn: number,
-  today: number,
+  monday: number,
   weeks: number,
 ): number[] {
-  const daily = (day: number) => (weekly[Math.floor((day - madeOn) / 7)] ?? 0) / 7;
+  /** Chance of being due before the morning of `day`. */
+  const before = (day: number) => {
+    const elapsed = Math.max(day - madeOn, 0) / 7;
+    const whole = Math.floor(elapsed);
+    const sum = weekly.slice(0, whole).reduce((total, chance) => total + chance, 0);
+    return sum + (elapsed - whole) * (weekly[whole] ?? 0);
+  };
   return Array.from({ length: weeks }, (_, w) => {
-    const from = w === 0 ? madeOn : today + 7 * w;
-    let chance = 0;
-    for (let day = from; day < today + 7 * (w + 1); day++) chance += daily(day);
-    return Math.min(chance, 1);
+    const since = w === 0 ? 0 : before(monday + 7 * w);
+    return Math.min(Math.max(before(monday + 7 * (w + 1)) - since, 0), 1);
   });
 }
 
@@ -37,6 +46,6 @@ export function chainsOfWeek(chains: readonly ChainChance[], w: number) {
       { chainId, label, riderName, kind: 'replacement' as const, chance: replacement[w] ?? 0 },
     ])
     .filter(({ chance }) => chance >= WORTH_NAMING)
-    .sort((a, b) => b.chance - a.chance)
+    .sort((a, b) => b.chance - a.chance || (a.chainId < b.chainId ? -1 : 1))
     .slice(0, MOST_CHAINS);
 }

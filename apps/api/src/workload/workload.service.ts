@@ -1,84 +1,98 @@
 import { Injectable } from '@nestjs/common';
-import type { Workload } from '@halfpitch/contracts';
-import { workload, WeekLoad } from '@halfpitch/estimation';
-import { dayNumber, dayOfNumber } from '../common/calendar';
+import type { Regime, Workload } from '@halfpitch/contracts';
+import { dayOf, isoDay, withRenewals } from '@halfpitch/estimation';
 import { Clock } from '../common/clock';
 import { TenantDb } from '../database/tenant-db';
+import type { StoredSettings } from '../workshop/workshop.entity';
 import { WorkshopService } from '../workshop/workshop.service';
-import type { Workshop } from '../workshop/workshop.entity';
-import { ChainChance, chainsOfWeek, shiftWeeks } from './week-chances';
+import { band, counts, map, plus } from './counts';
+import { ChainChance, chainsOfWeek, mondayOf, shiftWeeks } from './week-chances';
 
 const WEEKS = 12;
-/** Share of riders who come when written to; until reminders have taught better. Our judgement, no source. */
-const COMES = 0.85;
 
 interface Row {
-  chain_id: string;
+  chainId: string;
   label: string;
-  rider_name: string;
-  made_on: string;
+  regime: Regime;
+  riderName: string;
+  madeOn: string;
   weekly: { lubrication: number[] | null; replacement: number[] };
 }
 
 const NEWEST = `
-  select chain.id as chain_id, chain.label, rider.name as rider_name, estimate.made_on::text,
-         estimate.detail -> 'weekly' as weekly
+  select chain.id as "chainId", chain.label, chain.regime, rider.name as "riderName",
+         estimate.made_on::text as "madeOn", estimate.weekly
   from chain join rider on rider.id = chain.rider_id
   join lateral (
-    select made_on, detail from estimate where chain_id = chain.id order by made_on desc limit 1) estimate on true
+    select made_on, detail -> 'weekly' as weekly from estimate
+    where chain_id = chain.id order by made_on desc limit 1) estimate on true
   where chain.retired_on is null`;
 
-type Bench = Workshop['settings']['bench'];
+function toChance({ madeOn, weekly, regime, ...row }: Row, monday: number): ChainChance {
+  const shift = (chances: number[]) => shiftWeeks(chances, dayOf(madeOn), monday, WEEKS);
+  return {
+    ...row,
+    dipped: regime === 'immersion-wax',
+    lubrication: weekly.lubrication && shift(weekly.lubrication),
+    replacement: shift(weekly.replacement),
+  };
+}
 
 /** The coming twelve weeks, summed exactly from every chain's own chances. */
 @Injectable()
 export class WorkloadService {
   constructor(
     private readonly db: TenantDb,
-    private readonly workshop: WorkshopService,
+    private readonly workshops: WorkshopService,
     private readonly clock: Clock,
   ) {}
 
   async read(workshopId: string): Promise<Workload> {
-    const { settings, timeZone } = await this.workshop.current(workshopId);
-    const today = dayNumber(this.clock.today(timeZone));
+    const { settings, timeZone } = await this.workshops.current(workshopId);
+    const monday = mondayOf(dayOf(this.clock.today(timeZone)));
     const rows = await this.db.manager.query<Row[]>(NEWEST);
-    const chains = rows.map((row): ChainChance => {
-      const madeOn = dayNumber(row.made_on);
-      const { lubrication, replacement } = row.weekly;
-      return {
-        chainId: row.chain_id,
-        label: row.label,
-        riderName: row.rider_name,
-        lubrication: lubrication && shiftWeeks(lubrication, madeOn, today, WEEKS),
-        replacement: shiftWeeks(replacement, madeOn, today, WEEKS),
-      };
-    });
-    const weeks = workload(chains, { weeks: WEEKS, comes: COMES });
+    const chains = rows.map((row) => toChance(row, monday));
+    const visits = chains.map(({ lubrication, dipped }) => ({
+      dipped,
+      chances: lubrication ? withRenewals(lubrication, WEEKS) : [],
+    }));
     return {
       minutesPerWeek: settings.bench.minutesPerWeek,
-      weeks: weeks.map((week, w) => ({
-        from: dayOfNumber(today + 7 * w),
-        to: dayOfNumber(today + 7 * w + 6),
-        ...withBench(week, settings.bench),
-        chains: chainsOfWeek(chains, w),
-      })),
+      weeks: Array.from({ length: WEEKS }, (_, w) => {
+        const inWeek = visits.map(({ dipped, chances }) => ({ dipped, chance: chances[w] ?? 0 }));
+        return {
+          from: isoDay(monday + 7 * w),
+          to: isoDay(monday + 7 * w + 6),
+          ...weekLoad(
+            inWeek,
+            chains.map(({ replacement }) => replacement[w] ?? 0),
+            settings.bench,
+          ),
+          chains: chainsOfWeek(chains, w),
+        };
+      }),
     };
   }
 }
 
-/** Bench time and pot loads that a week's counts ask for. */
-function withBench({ treatments, replacements }: WeekLoad, bench: Bench) {
-  const each = (of: (treatments: number, replacements: number) => number) => ({
-    p10: of(treatments.p10, replacements.p10),
-    p50: of(treatments.p50, replacements.p50),
-    p90: of(treatments.p90, replacements.p90),
-    mean: of(treatments.mean, replacements.mean),
-  });
+/** What a week's visits come to: chains are independent of each other, so every sum is exact. */
+function weekLoad(
+  visits: { dipped: boolean; chance: number }[],
+  replacing: number[],
+  bench: StoredSettings['bench'],
+) {
+  const treatments = counts(visits.map(({ chance }) => chance));
+  const replacements = counts(replacing);
+  const dips = counts(visits.flatMap(({ dipped, chance }) => (dipped ? [chance] : [])));
   return {
-    treatments,
-    replacements,
-    benchMinutes: each((t, r) => t * bench.minutesPerTreatment + r * bench.minutesPerReplacement),
-    potLoads: each((t) => Math.ceil(t / bench.chainsPerPotLoad)),
+    treatments: band(treatments),
+    replacements: band(replacements),
+    benchMinutes: band(
+      plus(
+        map(treatments, (n) => n * bench.minutesPerTreatment),
+        map(replacements, (n) => n * bench.minutesPerReplacement),
+      ),
+    ),
+    potLoads: band(map(dips, (n) => Math.ceil(n / bench.chainsPerPotLoad))),
   };
 }

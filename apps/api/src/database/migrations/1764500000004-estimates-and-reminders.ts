@@ -28,7 +28,7 @@ export class EstimatesAndReminders1764500000004 implements MigrationInterface {
         text text not null,
         html text not null,
         headers jsonb not null default '{}',
-        state text not null default 'waiting' check (state in ('waiting', 'withheld', 'sending', 'sent', 'failed')),
+        state text not null default 'waiting' check (state in ('waiting', 'sending', 'sent', 'failed')),
         attempts integer not null default 0,
         last_error text,
         created_at timestamptz not null default now(),
