@@ -4,16 +4,11 @@ import { TenantDb } from '../database/tenant-db';
 import { QueueService } from '../jobs/queue.service';
 import { QUEUES, Tasks } from '../jobs/tasks';
 import { Mail } from './mail.entity';
+import { mayHaveArrived } from './may-have-arrived';
 import { MailTransport } from './transport';
 
 const UNCLEAR =
   'The connection ended while it was being sent: it may have arrived. It is not sent a second time by itself.';
-
-/** A failure after the letter was handed over: the server may have taken it. */
-const isUnclear = (error: unknown) => {
-  const { command, responseCode } = error as { command?: string; responseCode?: number };
-  return command === 'DATA' && responseCode === undefined;
-};
 
 /**
  * Sends letters at most once each. A letter is marked 'sending' before the dialogue begins; one found so marked later
@@ -41,7 +36,7 @@ export class MailTasks implements OnModuleInit {
     try {
       await this.transport.send(mail);
     } catch (error) {
-      const unclear = isUnclear(error);
+      const unclear = mayHaveArrived(error);
       const over = unclear || mail.attempts >= QUEUES['send-mail'].retryLimit;
       const lastError = unclear ? UNCLEAR : (error as Error).message;
       await this.db.run(scope, () =>

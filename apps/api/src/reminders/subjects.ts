@@ -36,13 +36,20 @@ export function subjectsOf(manager: EntityManager, chainIds: string[]): Promise<
   );
 }
 
-/** Closes what is open about chains that were retired, and about treatments that have been redone since. */
+/**
+ * Closes what is open about chains that were retired, and about treatments that have been redone since. A letter that
+ * has not left yet is taken back.
+ */
 export async function closeOutlived(manager: EntityManager, chainIds: string[], now: Date): Promise<void> {
   await manager.query(
-    `update reminder set closed_at = $2 from chain
-      where chain.id = reminder.chain_id and chain.id = any($1) and closed_at is null
-        and (chain.retired_on is not null
-             or kind = 'lubrication' and cycle <> coalesce(${LAST_TREATMENT}::text, chain.in_service_on::text))`,
+    `with outlived as (
+       update reminder set closed_at = $2 from chain
+        where chain.id = reminder.chain_id and chain.id = any($1) and closed_at is null
+          and (chain.retired_on is not null
+               or kind = 'lubrication'
+                  and cycle <> coalesce(${LAST_TREATMENT}::text, chain.in_service_on::text))
+       returning mail_id)
+     delete from mail using outlived where mail.id = outlived.mail_id and mail.state = 'waiting'`,
     [chainIds, now],
   );
 }
