@@ -16,19 +16,26 @@ describe('mondayOf', () => {
 
 describe('shiftWeeks', () => {
   const weekly = [0.1, 0.2, 0.3, 0.4];
+  const kept = { now: 0, weekly };
 
   it('leaves the chances of an estimate made on that Monday as they are', () => {
-    shiftWeeks(weekly, 100, 100, 3).forEach((p, w) => expect(p).toBeCloseTo(weekly[w]!, 12));
+    shiftWeeks(kept, 100, 100, 3).forEach((p, w) => expect(p).toBeCloseTo(weekly[w]!, 12));
   });
 
   it('counts what fell due before as due in the first week, and loses nothing', () => {
-    const shifted = shiftWeeks(weekly, 100, 107, 3);
+    const shifted = shiftWeeks(kept, 100, 107, 3);
     expect(shifted[0]).toBeCloseTo(0.3, 12);
     expect(sum(shifted)).toBeCloseTo(1, 12);
   });
 
+  it('leaves what is due already in the first week, however late in it', () => {
+    const shifted = shiftWeeks({ now: 0.9, weekly: [0.97, 0.03] }, 106, 100, 3);
+    expect(shifted[0]).toBeCloseTo(0.91, 12);
+    expect(sum(shifted)).toBeCloseTo(1, 12);
+  });
+
   it('spreads a week that straddles a Monday over both', () => {
-    const shifted = shiftWeeks(weekly, 103, 100, 5);
+    const shifted = shiftWeeks(kept, 103, 100, 5);
     expect(shifted[0]).toBeCloseTo((4 / 7) * 0.1, 12);
     expect(shifted[1]).toBeCloseTo((3 / 7) * 0.1 + (4 / 7) * 0.2, 12);
     expect(sum(shifted)).toBeCloseTo(1, 12);

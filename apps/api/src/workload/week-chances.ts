@@ -15,20 +15,29 @@ const WORTH_NAMING = 0.05;
 /** The Monday of the week that a day falls in; days are counted since 1970-01-01, a Thursday. */
 export const mondayOf = (day: number): number => day - ((day + 3) % 7);
 
+/** Chances of falling due as an estimate keeps them: being due that day already, and in week w from it (that included). */
+export interface KeptChances {
+  now: number;
+  weekly: readonly number[];
+}
+
 /**
  * Weekly chances counted from the day an estimate was made, as calendar weeks from `monday`: what fell due before is
- * due in the first week; within a week of the estimate's own the chance is spread evenly.
+ * due in the first week; within a week of the estimate's own, what was not due at once is spread
+ * evenly.
  */
 export function shiftWeeks(
-  weekly: readonly number[],
+  { now, weekly }: KeptChances,
   madeOn: number,
   monday: number,
   weeks: number,
 ): number[] {
   /** Chance of being due before the morning of `day`. */
   const before = (day: number) => {
-    const elapsed = Math.max(day - madeOn, 0) / 7;
+    if (day <= madeOn) return 0;
+    const elapsed = (day - madeOn) / 7;
     const whole = Math.floor(elapsed);
+    if (whole === 0) return now + elapsed * ((weekly[0] ?? now) - now);
     const sum = weekly.slice(0, whole).reduce((total, chance) => total + chance, 0);
     return sum + (elapsed - whole) * (weekly[whole] ?? 0);
   };

@@ -3,10 +3,11 @@ import type { Regime, Workload } from '@halfpitch/contracts';
 import { dayOf, isoDay, withRenewals } from '@halfpitch/estimation';
 import { Clock } from '../common/clock';
 import { TenantDb } from '../database/tenant-db';
+import type { EstimateDetail } from '../estimates/estimate.entity';
 import type { StoredSettings } from '../workshop/workshop.entity';
 import { WorkshopService } from '../workshop/workshop.service';
 import { band, counts, map, plus } from './counts';
-import { ChainChance, chainsOfWeek, mondayOf, shiftWeeks } from './week-chances';
+import { ChainChance, chainsOfWeek, KeptChances, mondayOf, shiftWeeks } from './week-chances';
 
 const WEEKS = 12;
 
@@ -16,25 +17,34 @@ interface Row {
   regime: Regime;
   riderName: string;
   madeOn: string;
-  weekly: { lubrication: number[] | null; replacement: number[] };
+  weekly: EstimateDetail['weekly'];
+  lubricationNow: number | null;
+  replacementNow: number;
 }
 
 const NEWEST = `
   select chain.id as "chainId", chain.label, chain.regime, rider.name as "riderName",
-         estimate.made_on::text as "madeOn", estimate.weekly
+         estimate.made_on::text as "madeOn", detail -> 'weekly' as weekly,
+         (detail -> 'lubrication' ->> 'chanceNow')::float8 as "lubricationNow",
+         (detail -> 'replacement' ->> 'chanceNow')::float8 as "replacementNow"
   from chain join rider on rider.id = chain.rider_id
   join lateral (
-    select made_on, detail -> 'weekly' as weekly from estimate
+    select made_on, detail from estimate
     where chain_id = chain.id order by made_on desc limit 1) estimate on true
   where chain.retired_on is null`;
 
-function toChance({ madeOn, weekly, regime, ...row }: Row, monday: number): ChainChance {
-  const shift = (chances: number[]) => shiftWeeks(chances, dayOf(madeOn), monday, WEEKS);
+function toChance(
+  { chainId, label, riderName, regime, madeOn, weekly, ...now }: Row,
+  monday: number,
+): ChainChance {
+  const shift = (kept: KeptChances) => shiftWeeks(kept, dayOf(madeOn), monday, WEEKS);
   return {
-    ...row,
+    chainId,
+    label,
+    riderName,
     dipped: regime === 'immersion-wax',
-    lubrication: weekly.lubrication && shift(weekly.lubrication),
-    replacement: shift(weekly.replacement),
+    lubrication: weekly.lubrication && shift({ now: now.lubricationNow ?? 0, weekly: weekly.lubrication }),
+    replacement: shift({ now: now.replacementNow, weekly: weekly.replacement }),
   };
 }
 
