@@ -6,8 +6,8 @@ import type { Tasks } from '../jobs/tasks';
 import { WorkshopService } from '../workshop/workshop.service';
 import { Estimator } from './estimator.service';
 
-/** How many chains are loaded, estimated and kept in one transaction: bounds the memory, and what a crash undoes. */
-const BATCH = 200;
+/** Chains loaded, estimated and kept in one transaction: bounds the memory, what a crash undoes, and how long they are locked. */
+const BATCH = 50;
 
 @Injectable()
 export class EstimatesTasks implements OnModuleInit {
