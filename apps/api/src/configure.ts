@@ -5,9 +5,9 @@ import connectPgSimple from 'connect-pg-simple';
 import session from 'express-session';
 import helmet from 'helmet';
 import passport from 'passport';
-import { Pool } from 'pg';
 import { sameOrigin } from './common/same-origin';
 import { Environment } from './config/environment';
+import { SessionPool } from './database/session-pool';
 import { mountDocs } from './docs';
 
 const THIRTY_DAYS_MS = 30 * 86_400_000;
@@ -34,12 +34,11 @@ export function configure(app: NestExpressApplication): void {
   );
   app.use(compression());
   app.use('/api', sameOrigin(publicUrl));
-  const pool = new Pool({
-    connectionString: config.get('DATABASE_URL'),
-    max: 4,
-    application_name: 'halfpitch-sessions',
+  const store = new (connectPgSimple(session))({
+    pool: app.get(SessionPool).pool,
+    tableName: 'session',
+    pruneSessionInterval: 3600,
   });
-  const store = new (connectPgSimple(session))({ pool, tableName: 'session', pruneSessionInterval: 3600 });
   app.use(
     '/api',
     session({
@@ -55,8 +54,5 @@ export function configure(app: NestExpressApplication): void {
     passport.session(),
   );
   mountDocs(app);
-  app.getHttpServer().on('close', () => {
-    store.close();
-    void pool.end();
-  });
+  app.getHttpServer().on('close', () => store.close());
 }

@@ -37,7 +37,9 @@ export class AccountsService {
 
   async register(request: Request, input: z.infer<typeof registerWorkshop>): Promise<Done> {
     await this.throttle.count(request.ip ?? '', input.email);
-    return this.signIn(request, await this.registration.register(input));
+    const user = await this.registration.register(input);
+    await this.throttle.forget(input.email);
+    return this.signIn(request, user);
   }
 
   invitation(token: string): Promise<InvitationView> {
@@ -69,6 +71,7 @@ export class AccountsService {
   async changePassword(request: Request, actor: Actor, input: z.infer<typeof changePassword>): Promise<Done> {
     await this.throttle.count(request.ip ?? '', actor.email);
     await this.passwords.change(actor, input.current, input.password);
+    await this.throttle.forget(actor.email);
     return this.signIn(request, actor);
   }
 

@@ -3,6 +3,7 @@ import type { Request } from 'express';
 import { promisify } from 'node:util';
 import type { Actor } from '../common/actor';
 import { forbidden } from '../common/problems';
+import { SessionPool } from '../database/session-pool';
 import { TenantDb } from '../database/tenant-db';
 import { ActorsService } from './actors.service';
 import { Member } from './member.entity';
@@ -12,6 +13,7 @@ export class SessionsService {
   constructor(
     private readonly db: TenantDb,
     private readonly actors: ActorsService,
+    private readonly sessions: SessionPool,
   ) {}
 
   /** Makes the request's browser that of `actor`, under a new session id. */
@@ -23,9 +25,9 @@ export class SessionsService {
     await promisify<void>((done) => request.logout(done))();
   }
 
-  /** Ends every session of an account, on all devices. */
+  /** Ends every session of an account, on all devices, at once. */
   async endAll(accountId: string): Promise<void> {
-    await this.db.manager.query(
+    await this.sessions.pool.query(
       `delete from session where sess -> 'passport' -> 'user' ->> 'accountId' = $1`,
       [accountId],
     );

@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { RateLimiterPostgres, RateLimiterRes } from 'rate-limiter-flexible';
-import { DataSource } from 'typeorm';
 import { ProblemException } from '../common/problems';
+import { SessionPool } from '../database/session-pool';
 
 const MINUTES = 15;
 
@@ -11,11 +11,11 @@ export class Throttle {
   private readonly perAddress: RateLimiterPostgres;
   private readonly perAccount: RateLimiterPostgres;
 
-  constructor(dataSource: DataSource) {
+  constructor({ pool }: SessionPool) {
     const limiter = (keyPrefix: string, points: number) =>
       new RateLimiterPostgres({
-        storeClient: dataSource,
-        storeType: 'typeorm',
+        storeClient: pool,
+        storeType: 'pool',
         tableName: 'sign_in_throttle',
         tableCreated: true,
         keyPrefix,

@@ -6,6 +6,7 @@ import { TransactionalAdapterTypeOrm } from '@nestjs-cls/transactional-adapter-t
 import { ClsModule } from 'nestjs-cls';
 import { Environment } from '../config/environment';
 import { dataSourceOptions } from './data-source';
+import { SessionPool } from './session-pool';
 import { TenantDb } from './tenant-db';
 
 @Global()
@@ -27,7 +28,7 @@ import { TenantDb } from './tenant-db';
       ],
     }),
   ],
-  providers: [TenantDb],
-  exports: [TenantDb],
+  providers: [SessionPool, TenantDb],
+  exports: [SessionPool, TenantDb],
 })
 export class DatabaseModule {}

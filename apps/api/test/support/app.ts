@@ -59,7 +59,14 @@ export async function ownerOfNewWorkshop(booted: BootedApp, name: string) {
   const email = `owner@${name.toLowerCase().replaceAll(' ', '-')}.example`;
   await browser
     .post('/api/workshops')
-    .send({ workshopName: name, town: 'Tarnwick', timeZone: 'Europe/Berlin', name: 'Olive Owner', email, password: PASSWORD })
+    .send({
+      workshopName: name,
+      town: 'Tarnwick',
+      timeZone: 'Europe/Berlin',
+      name: 'Olive Owner',
+      email,
+      password: PASSWORD,
+    })
     .expect(201);
   const session = (await browser.get('/api/session').expect(200)).body as Session;
   return { browser, email, session };

@@ -6,7 +6,10 @@ import { prepareQueue } from '../../src/jobs/prepare-queue';
 
 function address(variable: string): string {
   const value = process.env[variable];
-  if (!value) throw new Error(`${variable} is missing: npm test sets it; for one spec, start tools/postgres/scratch.mjs.`);
+  if (!value)
+    throw new Error(
+      `${variable} is missing: npm test sets it; for one spec, start tools/postgres/scratch.mjs.`,
+    );
   return value;
 }
 

@@ -21,13 +21,15 @@ export class MailFake {
 
   /** Every letter to an address, newest first. */
   async lettersTo(address: string): Promise<Letter[]> {
-    const { messages } = await this.get<{ messages: { id: string }[] }>(`/api/messages?to=${encodeURIComponent(address)}`);
+    const { messages } = await this.get<{ messages: { id: string }[] }>(
+      `/api/messages?to=${encodeURIComponent(address)}`,
+    );
     return Promise.all(messages.map(({ id }) => this.get<Letter>(`/api/messages/${id}`)));
   }
 
   /** The newest letter to an address, waiting up to ten seconds for it. */
   async letterTo(address: string): Promise<Letter> {
-    for (const until = Date.now() + 10_000; Date.now() < until; ) {
+    for (const until = Date.now() + 10_000; Date.now() < until;) {
       const [letter] = await this.lettersTo(address);
       if (letter) return letter;
       await new Promise((resolve) => setTimeout(resolve, 50));
@@ -36,7 +38,11 @@ export class MailFake {
   }
 
   /** Makes the server refuse, delay or drop. */
-  async behave(behaviour: { mode: 'accept' | 'refuse' | 'try-later' | 'delay' | 'drop'; times?: number; delayMs?: number }): Promise<void> {
+  async behave(behaviour: {
+    mode: 'accept' | 'refuse' | 'try-later' | 'delay' | 'drop';
+    times?: number;
+    delayMs?: number;
+  }): Promise<void> {
     await fetch(`${this.web}/api/behaviour`, { method: 'PUT', body: JSON.stringify(behaviour) });
   }
 
