@@ -38,6 +38,8 @@ module.exports = {
   roots: ['<rootDir>/apps/api', '<rootDir>/libs', '<rootDir>/tools'],
   testRegex: '\\.(spec|e2e-spec)\\.ts$',
   testEnvironment: 'node',
+  // Booting the program with a database of its own takes seconds on a busy machine.
+  testTimeout: 60_000,
   moduleNameMapper: { '^@halfpitch/([^/]+)$': '<rootDir>/libs/$1/src/index.ts' },
   transform: { '\\.tsx?$': swc(false), '\\.m?js$': swc(true) },
   transformIgnorePatterns: [`/node_modules/(?!(?:${esModulePackages.join('|')})/)`],
