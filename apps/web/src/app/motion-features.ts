@@ -1,0 +1,1 @@
+export { domAnimation as default } from 'framer-motion';

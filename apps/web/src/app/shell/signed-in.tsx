@@ -1,0 +1,24 @@
+import { Navigate, useLocation } from 'react-router-dom';
+import { ErrorState } from '../../components/error-state';
+import { PageLoading } from '../../components/loading-state';
+import { SessionContext, useSessionQuery } from '../session';
+import { homeOf } from './nav-items';
+import { Shell } from './shell';
+
+/** Lets in who is signed in; others go to the sign-in and come back to where they wanted to be. */
+export function Component() {
+  const { data: session, error, refetch } = useSessionQuery();
+  const { pathname, search } = useLocation();
+  if (error && !session) return <ErrorState error={error} onRetry={() => void refetch()} />;
+  if (session === undefined) return <PageLoading />;
+  if (session === null) {
+    const back = pathname === '/' ? '' : `?to=${encodeURIComponent(pathname + search)}`;
+    return <Navigate to={`/sign-in${back}`} replace />;
+  }
+  if (pathname === '/' && homeOf(session.role) !== '/') return <Navigate to={homeOf(session.role)} replace />;
+  return (
+    <SessionContext value={session}>
+      <Shell />
+    </SessionContext>
+  );
+}

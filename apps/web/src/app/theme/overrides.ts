@@ -1,0 +1,85 @@
+import { defineRecipe, defineSlotRecipe } from '@chakra-ui/react/styled-system';
+
+const field = { bg: 'bg.panel', borderColor: 'border.control' };
+const comfortable = { textStyle: 'md', '--input-height': 'sizes.11' };
+
+/** Where the house differs: targets of 44 px, seen edges on controls, 16 px writing in fields. */
+export const recipeOverrides = {
+  button: defineRecipe({
+    base: { fontWeight: 'semibold', borderRadius: 'l2' },
+    variants: {
+      size: {
+        sm: { h: '9', textStyle: 'sm' },
+        md: { h: '11', minW: '11', textStyle: 'md', px: '5' },
+        lg: { h: '14', px: '6' },
+      },
+      variant: { outline: { bg: 'bg.panel' } },
+    },
+  }),
+  heading: defineRecipe({ base: { letterSpacing: '-0.01em', textWrap: 'balance' } }),
+  input: defineRecipe({ variants: { variant: { outline: field }, size: { md: comfortable } } }),
+  textarea: defineRecipe({ variants: { variant: { outline: field }, size: { md: { textStyle: 'md' } } } }),
+  link: defineRecipe({
+    defaultVariants: { variant: 'underline' },
+    variants: {
+      variant: {
+        underline: {
+          textDecorationColor: 'currentColor/50',
+          _hover: { textDecorationColor: 'currentColor' },
+        },
+      },
+    },
+  }),
+  skeleton: defineRecipe({ base: { _motionReduce: { animation: 'none' } } }),
+};
+
+export const slotRecipeOverrides = {
+  dialog: defineSlotRecipe({
+    slots: [],
+    base: { backdrop: { bg: 'rgba(20, 21, 23, 0.55)' }, content: { textStyle: 'md' } },
+  }),
+  field: defineSlotRecipe({
+    slots: [],
+    base: {
+      label: { textStyle: 'md', fontWeight: 'semibold' },
+      helperText: { textStyle: 'sm' },
+      errorText: { textStyle: 'sm', fontWeight: 'semibold' },
+      requiredIndicator: { color: 'fg.muted' },
+    },
+  }),
+  menu: defineSlotRecipe({
+    slots: [],
+    variants: { size: { md: { content: { minW: '15rem' }, item: { textStyle: 'md', py: '2.5', px: '3' } } } },
+  }),
+  nativeSelect: defineSlotRecipe({
+    slots: [],
+    variants: { variant: { outline: { field } }, size: { md: { field: { textStyle: 'md', h: '11' } } } },
+  }),
+  table: defineSlotRecipe({
+    slots: [],
+    variants: {
+      variant: { line: { row: { bg: 'transparent' }, columnHeader: { color: 'fg.muted', textStyle: 'sm' } } },
+      size: { md: { root: { textStyle: 'md' } } },
+    },
+  }),
+  toast: defineSlotRecipe({
+    slots: [],
+    base: {
+      root: {
+        borderWidth: '1px',
+        borderColor: 'border.emphasized',
+        borderInlineStartWidth: '6px',
+        borderInlineStartColor: 'steel.solid',
+        '&[data-type]': {
+          bg: 'bg.panel',
+          color: 'fg',
+          '--toast-trigger-bg': 'colors.bg.muted',
+          '--toast-border-color': 'colors.border.control',
+        },
+        '&[data-type=error]': { borderInlineStartColor: 'fg.error' },
+      },
+      title: { textStyle: 'md', fontWeight: 'semibold' },
+      description: { opacity: 1, color: 'fg.muted' },
+    },
+  }),
+};

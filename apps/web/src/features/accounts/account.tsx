@@ -1,0 +1,34 @@
+import { Button, Flex, Separator, Stack } from '@chakra-ui/react';
+import { useSession, useSignOut } from '../../app/session';
+import { PageHeader } from '../../components/page-header';
+import { toastError } from '../../components/toaster';
+import { LookSettings } from './look-settings';
+import { PasswordSettings } from './password-settings';
+import { PersonSettings } from './person-settings';
+import { WorkshopChoice } from './workshop-choice';
+
+/** One's own settings. */
+export function Account() {
+  const { account } = useSession();
+  const signOut = useSignOut();
+  const leave = (where: 'here' | 'everywhere') => void signOut(where).catch(toastError);
+  return (
+    <>
+      <PageHeader title="Account" lead={account.email} />
+      <Stack gap="8" maxWidth="30rem" separator={<Separator />}>
+        <PersonSettings />
+        <LookSettings />
+        <WorkshopChoice />
+        <PasswordSettings />
+        <Flex gap="3" wrap="wrap">
+          <Button onClick={() => leave('here')} variant="outline">
+            Sign out
+          </Button>
+          <Button onClick={() => leave('everywhere')} variant="outline">
+            Sign out everywhere
+          </Button>
+        </Flex>
+      </Stack>
+    </>
+  );
+}

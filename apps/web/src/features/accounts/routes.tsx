@@ -1,0 +1,21 @@
+import type { RouteObject } from 'react-router-dom';
+
+export const publicRoutes: RouteObject[] = [
+  {
+    lazy: async () => ({ Component: (await import('./entrance')).Entrance }),
+    children: [
+      { path: 'sign-in', lazy: async () => ({ Component: (await import('./sign-in')).SignIn }) },
+      { path: 'register', lazy: async () => ({ Component: (await import('./register')).Register }) },
+      { path: 'forgotten', lazy: async () => ({ Component: (await import('./forgotten')).Forgotten }) },
+      { path: 'reset/:token', lazy: async () => ({ Component: (await import('./reset')).Reset }) },
+      {
+        path: 'invitation/:token',
+        lazy: async () => ({ Component: (await import('./invitation')).Invitation }),
+      },
+    ],
+  },
+];
+
+export const routes: RouteObject[] = [
+  { path: 'account', lazy: async () => ({ Component: (await import('./account')).Account }) },
+];

@@ -1,0 +1,19 @@
+import react from '@vitejs/plugin-react';
+import { fileURLToPath } from 'node:url';
+import { defineConfig } from 'vitest/config';
+
+const here = (path: string) => fileURLToPath(new URL(path, import.meta.url));
+
+export default defineConfig({
+  root: here('.'),
+  plugins: [react()],
+  resolve: { tsconfigPaths: true },
+  build: { outDir: here('../../dist/apps/web'), emptyOutDir: true, target: 'es2023' },
+  server: { proxy: { '/api': process.env.API_URL ?? 'http://127.0.0.1:4190' } },
+  test: {
+    environment: 'jsdom',
+    include: ['src/**/*.spec.{ts,tsx}'],
+    setupFiles: [here('src/test-setup.ts')],
+    css: false,
+  },
+});
