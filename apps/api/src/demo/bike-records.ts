@@ -94,9 +94,10 @@ export class BikeRecords {
     const id = this.random.id(day);
     const startedAt = device ? new Date(day * 86_400_000 + ride.startS * 1000) : null;
     const told = { date, startedAt: startedAt?.toISOString() ?? null, distanceM: ride.distanceM };
+    // Written out, not spread: millions of these are made for a benchmark.
     this.household.rides.push({
-      ...this.owned,
       id,
+      workshopId: this.bike.workshopId,
       bikeId: this.bike.id,
       chainId,
       day: date,
