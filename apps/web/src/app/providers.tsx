@@ -1,22 +1,21 @@
 import { ChakraProvider } from '@chakra-ui/react';
 import { QueryClientProvider } from '@tanstack/react-query';
 import type { QueryClient } from '@tanstack/react-query';
-import { LazyMotion, MotionConfig } from 'framer-motion';
+import { lazy, Suspense } from 'react';
 import type { ReactNode } from 'react';
-import { Toasts } from '../components/toasts';
 import { system } from './theme/system';
 
-const motion = () => import('./motion-features').then((module) => module.default);
+const Toasts = lazy(async () => ({ default: (await import('../components/toasts')).Toasts }));
 
-/** What every page stands in: look, data, motion (which comes later and minds reduced motion), messages. */
+/** What every page stands in: look, data, and the place where messages come up. */
 export function Providers({ client, children }: { client: QueryClient; children: ReactNode }) {
   return (
     <ChakraProvider value={system}>
       <QueryClientProvider client={client}>
-        <LazyMotion features={motion} strict>
-          <MotionConfig reducedMotion="user">{children}</MotionConfig>
-        </LazyMotion>
-        <Toasts />
+        {children}
+        <Suspense>
+          <Toasts />
+        </Suspense>
       </QueryClientProvider>
     </ChakraProvider>
   );

@@ -1,5 +1,4 @@
 import { chakra, Flex, Text } from '@chakra-ui/react';
-import { m } from 'framer-motion';
 import { useId } from 'react';
 import { percent } from '../../app/format';
 import { StateWord } from '../state-word';
@@ -52,7 +51,12 @@ export function LinkStrip({ share, label, bare = false, decorative = false }: Li
         <Plates outer={false} />
         <Plates outer />
         <clipPath id={id}>
-          <m.rect x="0" y="0" height={2 * MIDDLE} initial={false} animate={{ width: filledTo(share) }} />
+          <rect
+            x="0"
+            y="0"
+            height={2 * MIDDLE}
+            style={{ width: filledTo(share), transition: 'width 700ms' }}
+          />
         </clipPath>
         {rollers.map((i) => (
           <circle key={i} cx={rollerX(i)} cy={MIDDLE} r={ROLLER} fill="var(--hp-colors-bg)" />
