@@ -13,6 +13,7 @@ export interface RequestOptions<S extends z.ZodType> {
   query?: Record<string, QueryValue>;
   /** Sent twice under the same key, the server does it once. */
   idempotencyKey?: string;
+  headers?: Record<string, string>;
   signal?: AbortSignal;
 }
 
@@ -47,7 +48,7 @@ export async function request<S extends z.ZodType>(
   options: RequestOptions<S>,
 ): Promise<z.output<S>> {
   const { method = 'GET', body, schema, query, idempotencyKey, signal } = options;
-  const headers = new Headers({ accept: 'application/json' });
+  const headers = new Headers({ ...options.headers, accept: 'application/json' });
   if (body !== undefined) headers.set('content-type', 'application/json');
   if (idempotencyKey) headers.set('idempotency-key', idempotencyKey);
   const sent = body === undefined ? undefined : JSON.stringify(body);

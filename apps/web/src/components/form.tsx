@@ -1,4 +1,4 @@
-import { Alert, chakra, Stack } from '@chakra-ui/react';
+import { chakra, Stack } from '@chakra-ui/react';
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useState } from 'react';
 import type { ReactNode } from 'react';
@@ -6,6 +6,7 @@ import { FormProvider, useForm } from 'react-hook-form';
 import type { DefaultValues } from 'react-hook-form';
 import type { z } from 'zod';
 import { showProblems } from '../app/form-problems';
+import { Notice } from './notice';
 
 interface FormProps<I extends Record<string, unknown>, O> {
   /** The contract of what is sent; its messages stand beside the fields. */
@@ -38,11 +39,7 @@ export function Form<I extends Record<string, unknown>, O>({
     <FormProvider {...form}>
       <chakra.form noValidate onSubmit={(event) => void send(event)} width="full">
         <Stack gap="5">
-          {trouble && (
-            <Alert.Root>
-              <Alert.Title>{trouble}</Alert.Title>
-            </Alert.Root>
-          )}
+          {trouble && <Notice kind="trouble">{trouble}</Notice>}
           {children}
         </Stack>
       </chakra.form>

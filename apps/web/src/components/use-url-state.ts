@@ -21,8 +21,8 @@ export function useUrlState(name: string, fallback = ''): [string, (value: strin
   return [params.get(name) ?? fallback, set];
 }
 
-/** The page of a list that is shown, from 1. */
-export function usePageNumber(): number {
-  const [page] = useUrlState('page', '1');
-  return Math.max(1, Math.trunc(Number(page)) || 1);
+/** The page of a list that is shown, from 1, and the way to another. */
+export function usePageNumber(): [number, (page: number) => void] {
+  const [page, set] = useUrlState('page', '1');
+  return [Math.max(1, Math.trunc(Number(page)) || 1), useCallback((to: number) => set(String(to)), [set])];
 }

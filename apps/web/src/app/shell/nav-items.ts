@@ -4,6 +4,7 @@ import {
   Bike,
   CalendarClock,
   CalendarRange,
+  CircleHelp,
   FileUp,
   Mail,
   PenLine,
@@ -29,7 +30,7 @@ export const navItems: Record<Role, readonly [NavItem, ...NavItem[]]> = {
   rider: [
     { to: '/', label: 'Bikes', icon: Bike },
     { to: '/log', label: 'Log a ride', icon: PenLine },
-    { to: '/import', label: 'Add file', icon: FileUp },
+    { to: '/import', label: 'Ride files', icon: FileUp },
   ],
   mechanic: [bench, riders],
   desk: [due, riders, reminders],
@@ -43,6 +44,7 @@ export const navItems: Record<Role, readonly [NavItem, ...NavItem[]]> = {
   ],
 };
 
+export const howItem: NavItem = { to: '/how', label: 'How we estimate', icon: CircleHelp };
 export const accountItem: NavItem = { to: '/account', label: 'Account', icon: UserRound };
 
 /** The page a role starts on. */

@@ -3,7 +3,7 @@ import { NavLink } from 'react-router-dom';
 import { useSession } from '../session';
 import { AccountMenu } from './account-menu';
 import { Brand, BrandMark } from './brand';
-import { MoreMenu } from './more-menu';
+import { MorePlaces } from './more-places';
 import { accountItem, homeOf, navItems } from './nav-items';
 import type { NavItem } from './nav-items';
 import { hasSidebar, navStyles, targetStyles } from './nav-styles';
@@ -52,7 +52,7 @@ export function Nav() {
         <NavTarget key={item.to} item={item} phone={i < ON_PHONE} />
       ))}
       {overflow.length > 0 ? (
-        <MoreMenu items={[...overflow, accountItem]} />
+        <MorePlaces items={[...overflow, accountItem]} />
       ) : (
         <NavTarget item={accountItem} wide={false} />
       )}

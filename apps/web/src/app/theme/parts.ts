@@ -1,37 +1,24 @@
 import {
-  alertSlotRecipe,
   badgeRecipe,
   buttonRecipe,
-  cardSlotRecipe,
-  checkboxSlotRecipe,
-  checkmarkRecipe,
   containerRecipe,
-  dialogSlotRecipe,
   fieldSlotRecipe,
   fieldsetSlotRecipe,
   headingRecipe,
   iconRecipe,
   inputRecipe,
   linkRecipe,
-  listSlotRecipe,
-  menuSlotRecipe,
   nativeSelectSlotRecipe,
-  progressSlotRecipe,
   separatorRecipe,
   skeletonRecipe,
   spinnerRecipe,
-  switchSlotRecipe,
-  tableSlotRecipe,
-  tabsSlotRecipe,
   textareaRecipe,
-  toastSlotRecipe,
 } from '@chakra-ui/react/theme';
 
 /** Only the parts that are used are given their styles: each one more costs on the first page. */
 export const recipes = {
   badge: badgeRecipe,
   button: buttonRecipe,
-  checkmark: checkmarkRecipe,
   container: containerRecipe,
   heading: headingRecipe,
   icon: iconRecipe,
@@ -44,18 +31,7 @@ export const recipes = {
 };
 
 export const slotRecipes = {
-  alert: alertSlotRecipe,
-  card: cardSlotRecipe,
-  checkbox: checkboxSlotRecipe,
-  dialog: dialogSlotRecipe,
   field: fieldSlotRecipe,
   fieldset: fieldsetSlotRecipe,
-  list: listSlotRecipe,
-  menu: menuSlotRecipe,
   nativeSelect: nativeSelectSlotRecipe,
-  progress: progressSlotRecipe,
-  switch: switchSlotRecipe,
-  table: tableSlotRecipe,
-  tabs: tabsSlotRecipe,
-  toast: toastSlotRecipe,
 };

@@ -1,7 +1,0 @@
-import type { ColorMode } from './color-mode';
-
-export const colorModeWords: Record<ColorMode, string> = {
-  light: 'Light',
-  dark: 'Dark',
-  system: 'As the device',
-};
