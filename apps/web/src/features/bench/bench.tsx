@@ -4,7 +4,7 @@ import { EmptyState } from '../../components/empty-state';
 import { ErrorState } from '../../components/error-state';
 import { LoadingState } from '../../components/loading-state';
 import { PageHeader } from '../../components/page-header';
-import { Pager } from '../../components/pager';
+import { Paging } from '../../components/paging';
 import { SearchBox } from '../../components/search-box';
 import { usePageNumber, useUrlState } from '../../components/use-url-state';
 import { chainsQuery } from './api/chains';
@@ -13,7 +13,7 @@ import { BenchRow } from './bench-row';
 /** Every chain in service, the one due first at the top. */
 export function Bench() {
   const [search] = useUrlState('search');
-  const page = usePageNumber();
+  const [page, onPage] = usePageNumber();
   const { data, error, refetch } = useQuery(chainsQuery({ order: 'soonest', search, page, size: 25 }));
   return (
     <>
@@ -40,7 +40,7 @@ export function Bench() {
           </Stack>
         )}
       </Stack>
-      {data && <Pager page={data} />}
+      {data && data.total > 0 && <Paging {...data} onPage={onPage} />}
     </>
   );
 }
