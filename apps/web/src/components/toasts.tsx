@@ -1,9 +1,14 @@
-import { Portal, Stack, Toast, Toaster } from '@chakra-ui/react';
+import { createToaster, Portal, Stack, Toast, Toaster } from '@chakra-ui/react';
 import { X } from 'lucide-react';
-import { toaster } from './toaster';
+
+export const toaster = createToaster({
+  placement: 'bottom',
+  pauseOnPageIdle: true,
+  offsets: { bottom: '5.5rem', top: '1rem', left: '1rem', right: '1rem' },
+});
 
 /** The messages that come up at the foot of the page. */
-export function Toasts() {
+export default function Toasts() {
   return (
     <Portal>
       <Toaster toaster={toaster} insetInline={{ mdDown: '4' }}>

@@ -6,10 +6,11 @@ import { toastError } from '../../components/toaster';
 import { useSession, useSignOut } from '../session';
 import { hasSidebar, targetStyles } from './nav-styles';
 import { panelLine, PopPanel } from './pop-panel';
+import { WorkshopSwitch } from './workshop-switch';
 
 const Line = chakra(NavLink, { base: panelLine });
 
-/** Settings, look and the way out; on phones the account page stands for it. */
+/** Settings, look, workshop and the way out; on phones the account page stands for it. */
 export function AccountMenu() {
   const { account, role, workshop } = useSession();
   const signOut = useSignOut();
@@ -29,6 +30,7 @@ export function AccountMenu() {
       <Box px="3" py="2">
         <LookTiles />
       </Box>
+      <WorkshopSwitch />
       <chakra.button type="button" css={panelLine} onClick={() => void signOut().catch(toastError)}>
         <LogOut size={18} aria-hidden="true" /> Sign out
       </chakra.button>

@@ -4,20 +4,19 @@ import { useSession } from '../session';
 import { AccountMenu } from './account-menu';
 import { Brand, BrandMark } from './brand';
 import { MorePlaces } from './more-places';
-import { accountItem, homeOf, navItems } from './nav-items';
+import { accountItem, homeOf, howItem, navItems } from './nav-items';
 import type { NavItem } from './nav-items';
 import { hasSidebar, navStyles, targetStyles } from './nav-styles';
 
 const Target = chakra(NavLink);
-/** So many targets fit a phone's bar beside the last, which is Account or More. */
+/** So many targets fit a phone's bar beside the last, which opens the rest. */
 const ON_PHONE = 3;
 
-function NavTarget({ item, phone = true, wide = true }: { item: NavItem; phone?: boolean; wide?: boolean }) {
+function NavTarget({ item, phone = true }: { item: NavItem; phone?: boolean }) {
   const { role } = useSession();
-  const styles = targetStyles(role);
-  const display = { base: phone ? 'flex' : 'none', md: wide ? 'flex' : 'none' };
+  const display = { base: phone ? 'flex' : 'none', md: 'flex' };
   return (
-    <Target to={item.to} end={item.to === '/'} css={styles} display={display}>
+    <Target to={item.to} end={item.to === '/'} css={targetStyles(role)} display={display}>
       <item.icon size={22} strokeWidth={1.75} aria-hidden="true" />
       <span>{item.label}</span>
     </Target>
@@ -28,7 +27,6 @@ function NavTarget({ item, phone = true, wide = true }: { item: NavItem; phone?:
 export function Nav() {
   const { role } = useSession();
   const items = navItems[role];
-  const overflow = items.slice(ON_PHONE);
   return (
     <Box as="nav" aria-label="Main" css={navStyles(role)}>
       <Target
@@ -51,12 +49,9 @@ export function Nav() {
       {items.map((item, i) => (
         <NavTarget key={item.to} item={item} phone={i < ON_PHONE} />
       ))}
-      {overflow.length > 0 ? (
-        <MorePlaces items={[...overflow, accountItem]} />
-      ) : (
-        <NavTarget item={accountItem} wide={false} />
-      )}
+      <MorePlaces items={[...items.slice(ON_PHONE), howItem, accountItem]} />
       <Box flex="1" hideBelow="md" />
+      <NavTarget item={howItem} phone={false} />
       <AccountMenu />
     </Box>
   );

@@ -61,7 +61,8 @@ export function PopPanel({ label, icon: Icon, buttonStyles, place, children }: P
         popover="auto"
         css={place}
         onClick={(event) => {
-          if (event.target instanceof Element && event.target.closest('a')) panel.current?.hidePopover();
+          if (event.target instanceof Element && event.target.closest('a, [data-closes]'))
+            panel.current?.hidePopover();
         }}
       >
         {children}

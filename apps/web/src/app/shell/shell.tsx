@@ -1,11 +1,9 @@
 import { Box, chakra, HStack, Text } from '@chakra-ui/react';
-import { lazy, Suspense, useEffect, useRef } from 'react';
+import { useEffect, useRef } from 'react';
 import { Outlet, ScrollRestoration, useLocation } from 'react-router-dom';
 import { useSession } from '../session';
 import { Brand } from './brand';
 import { Nav } from './nav';
-
-const Toasts = lazy(async () => ({ default: (await import('../../components/toasts')).Toasts }));
 
 const SkipLink = chakra('a', {
   base: {
@@ -67,9 +65,6 @@ export function Shell() {
           <Outlet />
         </Box>
       </Box>
-      <Suspense>
-        <Toasts />
-      </Suspense>
       <ScrollRestoration />
     </Box>
   );

@@ -1,6 +1,7 @@
 import { Navigate, useLocation } from 'react-router-dom';
 import { ErrorState } from '../../components/error-state';
 import { PageLoading } from '../../components/loading-state';
+import { MotionArea } from '../../components/motion-area';
 import { SessionContext, useSessionQuery } from '../session';
 import { homeOf } from './nav-items';
 import { Shell } from './shell';
@@ -18,7 +19,9 @@ export function Component() {
   if (pathname === '/' && homeOf(session.role) !== '/') return <Navigate to={homeOf(session.role)} replace />;
   return (
     <SessionContext value={session}>
-      <Shell />
+      <MotionArea>
+        <Shell />
+      </MotionArea>
     </SessionContext>
   );
 }

@@ -1,8 +1,9 @@
 import { Button, Flex, Separator, Stack } from '@chakra-ui/react';
 import { useSession, useSignOut } from '../../app/session';
+import { LookTiles } from '../../components/look-tiles';
 import { PageHeader } from '../../components/page-header';
 import { toastError } from '../../components/toaster';
-import { LookSettings } from './look-settings';
+
 import { PasswordSettings } from './password-settings';
 import { PersonSettings } from './person-settings';
 import { WorkshopChoice } from './workshop-choice';
@@ -17,7 +18,7 @@ export function Account() {
       <PageHeader title="Account" lead={account.email} />
       <Stack gap="8" maxWidth="30rem" separator={<Separator />}>
         <PersonSettings />
-        <LookSettings />
+        <LookTiles />
         <WorkshopChoice />
         <PasswordSettings />
         <Flex gap="3" wrap="wrap">

@@ -28,9 +28,6 @@ export const putPassword = (body: z.output<typeof changePassword>) =>
 export const putAccount = (body: z.output<typeof accountChange>) =>
   request('/account', { method: 'PUT', body, schema: done });
 
-export const postChosenWorkshop = (workshopId: string) =>
-  request('/session/workshop', { method: 'POST', body: { workshopId }, schema: session });
-
 export const invitationQuery = (token: string) =>
   queryOptions({
     queryKey: ['invitation', token],

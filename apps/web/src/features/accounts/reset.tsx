@@ -5,7 +5,6 @@ import { z } from 'zod';
 import { Form } from '../../components/form';
 import { PageHeader } from '../../components/page-header';
 import { SubmitButton } from '../../components/submit-button';
-import { toastDone } from '../../components/toaster';
 import { postReset } from './calls';
 import { NewPasswordField } from './new-password-field';
 
@@ -26,14 +25,13 @@ export function Reset() {
         defaultValues={{ password: '' }}
         onSubmit={async (values) => {
           await postReset(token, values.password);
-          toastDone('The new password is set. Sign in with it.');
-          await navigate('/sign-in', { replace: true });
+          await navigate('/sign-in', { replace: true, state: { hasNewPassword: true } });
         }}
       >
         <NewPasswordField label="New password" />
         <SubmitButton>Set the password</SubmitButton>
         <Link asChild alignSelf="flex-start">
-          <RouterLink to="/forgotten">Ask for another link</RouterLink>
+          <RouterLink to="/forgot">Ask for another link</RouterLink>
         </Link>
       </Form>
     </>

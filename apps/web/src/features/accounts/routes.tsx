@@ -6,7 +6,7 @@ export const publicRoutes: RouteObject[] = [
     children: [
       { path: 'sign-in', lazy: async () => ({ Component: (await import('./sign-in')).SignIn }) },
       { path: 'register', lazy: async () => ({ Component: (await import('./register')).Register }) },
-      { path: 'forgotten', lazy: async () => ({ Component: (await import('./forgotten')).Forgotten }) },
+      { path: 'forgot', lazy: async () => ({ Component: (await import('./forgot')).Forgot }) },
       { path: 'reset/:token', lazy: async () => ({ Component: (await import('./reset')).Reset }) },
       {
         path: 'invitation/:token',

@@ -1,6 +1,6 @@
 import { Flex, Link } from '@chakra-ui/react';
 import { signIn } from '@halfpitch/contracts';
-import { Link as RouterLink } from 'react-router-dom';
+import { Link as RouterLink, useLocation } from 'react-router-dom';
 import { Form } from '../../components/form';
 import { PageHeader } from '../../components/page-header';
 import { SubmitButton } from '../../components/submit-button';
@@ -10,9 +10,13 @@ import { useEnter } from './entry';
 
 export function SignIn() {
   const enter = useEnter();
+  const state = useLocation().state as { hasNewPassword?: boolean } | null;
   return (
     <>
-      <PageHeader title="Sign in" />
+      <PageHeader
+        title="Sign in"
+        lead={state?.hasNewPassword && 'Your new password is set. Sign in with it.'}
+      />
       <Form
         schema={signIn}
         defaultValues={{ email: '', password: '' }}
@@ -26,7 +30,7 @@ export function SignIn() {
         <SubmitButton>Sign in</SubmitButton>
         <Flex justify="space-between" wrap="wrap" gap="3">
           <Link asChild>
-            <RouterLink to="/forgotten">Forgotten the password?</RouterLink>
+            <RouterLink to="/forgot">Forgotten the password?</RouterLink>
           </Link>
           <Link asChild>
             <RouterLink to="/register">Register a workshop</RouterLink>

@@ -1,22 +1,12 @@
 import { Button, Heading, Stack } from '@chakra-ui/react';
-import { useQueryClient } from '@tanstack/react-query';
-import { useNavigate } from 'react-router-dom';
 import { useSession } from '../../app/session';
-import { sessionKey } from '../../app/session-key';
+import { useChooseWorkshop } from '../../app/workshop-choice';
 import { toastError } from '../../components/toaster';
-import { postChosenWorkshop } from './calls';
 
 /** For who belongs to more than one workshop: which one to work in. */
 export function WorkshopChoice() {
   const { workshop, workshops } = useSession();
-  const client = useQueryClient();
-  const navigate = useNavigate();
-  const choose = async (id: string) => {
-    const session = await postChosenWorkshop(id);
-    client.clear();
-    client.setQueryData(sessionKey, session);
-    await navigate('/');
-  };
+  const choose = useChooseWorkshop();
   if (workshops.length < 2) return null;
   return (
     <Stack as="section" gap="3" aria-labelledby="workshops">

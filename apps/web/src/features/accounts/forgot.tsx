@@ -9,7 +9,7 @@ import { TextField } from '../../components/fields/text-field';
 import { postForgotten } from './calls';
 
 /** Asks for a letter with a link; the answer is the same whether the address is known or not. */
-export function Forgotten() {
+export function Forgot() {
   const [sentTo, setSentTo] = useState<string | null>(null);
   const back = (
     <Link asChild alignSelf="flex-start">
