@@ -25,5 +25,5 @@ export const dark: Palette = {
   ink: { plain: '#EFEAE0', muted: '#BDB9AF', quiet: '#A9A59C', inverted: '#1B1C1E', error: '#F0A27E' },
   line: { hair: '#36383B', firm: '#4A4C50', control: '#8B8881' },
   steel: { solid: '#A9C4E2', onSolid: '#16202C', text: '#A9C4E2', wash: '#28323D', washStrong: '#34424F' },
-  dryness: { fresh: '#2B7F7D', turning: '#EBD6A8', dry: '#DD8B5C' },
+  dryness: { fresh: '#2B7F7D', turning: '#EBD6A8', dry: '#E09063' },
 };
