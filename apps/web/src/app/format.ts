@@ -20,7 +20,7 @@ export function distance(metres: number, unit: DistanceUnit): string {
 export const percent = (share: number): string => `${whole.format(share * 100)} %`;
 
 /** A percentage as it is, '0.38 %': elongation and its limits. */
-export const elongation = (value: number): string => `${decimals(2, 2).format(value)} %`;
+export const elongation = (value: number): string => `${decimals(2, 2).format(value).replace('-', '−')} %`;
 
 /** A chance, 0 to 1, in steps that do not boast: 'under 1 %', '40 %', 'over 99 %'. */
 export function chance(value: number): string {

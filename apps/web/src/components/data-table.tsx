@@ -1,4 +1,4 @@
-import { chakra, Table } from '@chakra-ui/react';
+import { chakra } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
 import { tableStyles } from './data-table-styles';
 import { Paging } from './paging';
@@ -30,7 +30,7 @@ const Head = chakra('th');
 export function DataTable<T>({ caption, columns, rows, rowKey, paging }: DataTableProps<T>) {
   return (
     <>
-      <Table.Root css={tableStyles} role="table">
+      <chakra.table css={tableStyles} role="table">
         <chakra.caption srOnly>{caption}</chakra.caption>
         <thead role="rowgroup">
           <tr role="row">
@@ -58,7 +58,7 @@ export function DataTable<T>({ caption, columns, rows, rowKey, paging }: DataTab
             </tr>
           ))}
         </tbody>
-      </Table.Root>
+      </chakra.table>
       {paging && <Paging {...paging} />}
     </>
   );

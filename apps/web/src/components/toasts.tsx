@@ -1,5 +1,6 @@
 import { createToaster, Portal, Stack, Toast, Toaster } from '@chakra-ui/react';
 import { X } from 'lucide-react';
+import { MoreParts } from '../app/theme/more-provider';
 
 export const toaster = createToaster({
   placement: 'bottom',
@@ -10,23 +11,25 @@ export const toaster = createToaster({
 /** The messages that come up at the foot of the page. */
 export default function Toasts() {
   return (
-    <Portal>
-      <Toaster toaster={toaster} insetInline={{ mdDown: '4' }}>
-        {(toast) => (
-          <Toast.Root width={{ md: 'sm' }}>
-            <Stack gap="1" flex="1">
-              <Toast.Title>{toast.title}</Toast.Title>
-              {toast.description && <Toast.Description>{toast.description}</Toast.Description>}
-            </Stack>
-            {toast.action && <Toast.ActionTrigger>{toast.action.label}</Toast.ActionTrigger>}
-            {toast.closable && (
-              <Toast.CloseTrigger aria-label="Close the message">
-                <X size={18} aria-hidden="true" />
-              </Toast.CloseTrigger>
-            )}
-          </Toast.Root>
-        )}
-      </Toaster>
-    </Portal>
+    <MoreParts>
+      <Portal>
+        <Toaster toaster={toaster} insetInline={{ mdDown: '4' }}>
+          {(toast) => (
+            <Toast.Root width={{ md: 'sm' }}>
+              <Stack gap="1" flex="1">
+                <Toast.Title>{toast.title}</Toast.Title>
+                {toast.description && <Toast.Description>{toast.description}</Toast.Description>}
+              </Stack>
+              {toast.action && <Toast.ActionTrigger>{toast.action.label}</Toast.ActionTrigger>}
+              {toast.closable && (
+                <Toast.CloseTrigger aria-label="Close the message">
+                  <X size={18} aria-hidden="true" />
+                </Toast.CloseTrigger>
+              )}
+            </Toast.Root>
+          )}
+        </Toaster>
+      </Portal>
+    </MoreParts>
   );
 }

@@ -3,6 +3,7 @@ import { ErrorState } from '../../components/error-state';
 import { PageLoading } from '../../components/loading-state';
 import { MotionArea } from '../../components/motion-area';
 import { SessionContext, useSessionQuery } from '../session';
+import { MoreParts } from '../theme/more-provider';
 import { homeOf } from './nav-items';
 import { Shell } from './shell';
 
@@ -19,9 +20,11 @@ export function Component() {
   if (pathname === '/' && homeOf(session.role) !== '/') return <Navigate to={homeOf(session.role)} replace />;
   return (
     <SessionContext value={session}>
-      <MotionArea>
-        <Shell />
-      </MotionArea>
+      <MoreParts>
+        <MotionArea>
+          <Shell />
+        </MotionArea>
+      </MoreParts>
     </SessionContext>
   );
 }

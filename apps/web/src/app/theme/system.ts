@@ -52,8 +52,11 @@ const parts = defineConfig({
   },
 });
 
-export const system = createSystem(
+export const baseConfigs = [
   defaultBaseConfig,
   parts,
   defineConfig({ theme: { recipes: recipeOverrides, slotRecipes: slotRecipeOverrides } }),
-);
+];
+
+/** For the first page; pages behind the sign-in have more parts. */
+export const system = createSystem(...baseConfigs);

@@ -13,6 +13,10 @@ describe('the calendar line', () => {
     }
   });
 
+  it('holds the booking too', () => {
+    expect(calendarSpan({ ...near, appointment: '2026-05-20' }).end > '2026-05-20').toBe(true);
+  });
+
   it('draws something when nothing comes within two years', () => {
     const { start, end } = calendarSpan({ p10: null, p50: null, p90: null, today });
     expect(start < today).toBe(true);
@@ -35,7 +39,7 @@ describe('the calendar line', () => {
     ]);
     expect(weekTicks({ start: '2026-01-01', end: '2028-01-01' })).toEqual([]);
     expect(monthTicks({ start: '2025-12-15', end: '2026-02-10' })).toEqual([
-      { day: '2026-01-01', word: 'Jan 2026' },
+      { day: '2026-01-01', word: '2026' },
       { day: '2026-02-01', word: 'Feb' },
     ]);
   });
@@ -43,5 +47,6 @@ describe('the calendar line', () => {
   it('never crowds its month words', () => {
     const words = monthTicks({ start: '2026-01-01', end: '2028-03-01' }).filter(({ word }) => word);
     expect(words.length).toBeLessThanOrEqual(8);
+    expect(words.map(({ word }) => word)).toContain('2027');
   });
 });

@@ -1,13 +1,14 @@
-import { along, LEFT, mainLines, meeting, PITCHES, readable, RIGHT, slideLines } from './vernier';
+import { along, LEFT, mainLines, PITCHES, readable, RIGHT } from './vernier';
 
 const ink = 'var(--hp-colors-fg)';
 const quiet = 'var(--hp-colors-fg-muted)';
 const steel = 'var(--hp-colors-steel-solid)';
 const pitches = Array.from({ length: PITCHES + 1 }, (_, i) => i);
 const PITCH = (RIGHT - LEFT) / PITCHES;
+/** Where the enlarged scale lies, drawing units from the top. */
+export const BASE = 128;
 
-/** The chain at its true length above a 12-inch rule: what the bare eye sees of the lengthening. */
-export function ChainOnRule({ value }: { value: number }) {
+function Chain({ value }: { value: number }) {
   const stretched = PITCH * (1 + readable(value) / 100);
   const pin = (i: number) => LEFT + i * stretched;
   return (
@@ -25,83 +26,73 @@ export function ChainOnRule({ value }: { value: number }) {
         />
       ))}
       {pitches.map((i) => (
-        <circle key={i} cx={pin(i)} cy="15" r="2.2" fill={i === PITCHES ? steel : ink} />
+        <circle key={i} cx={pin(i)} cy="15" r={i === PITCHES ? 3 : 2.2} fill={i === PITCHES ? steel : ink} />
       ))}
+    </g>
+  );
+}
+
+/** The chain at its true length above a 12-inch rule: what the bare eye sees of the lengthening. */
+export function ChainOnRule({ value }: { value: number }) {
+  return (
+    <g>
+      <Chain value={value} />
       <rect
-        x={LEFT}
+        x={LEFT - 8}
         y="27"
-        width={RIGHT - LEFT}
-        height="17"
+        width={RIGHT - LEFT + 24}
+        height="26"
+        rx="2"
         fill="var(--hp-colors-bg-muted)"
         stroke={quiet}
       />
       {pitches.map((i) => (
-        <path key={i} d={`M${LEFT + i * PITCH} 27v${i % 2 ? 4 : 8}`} stroke={ink} />
+        <g key={i}>
+          <path d={`M${LEFT + i * PITCH} 27v${i % 2 ? 5 : 9}`} stroke={ink} />
+          {i % 6 === 0 && (
+            <text x={LEFT + i * PITCH} y="49" fontSize="13" textAnchor="middle" fill={quiet}>
+              {i === PITCHES ? '12″' : i / 2}
+            </text>
+          )}
+        </g>
       ))}
     </g>
   );
 }
 
-/** The main scale in tenths of a percent, its words every half. */
-export function MainScale({ end }: { end: number }) {
+/** From the rule's last hundredths to the scale that shows them large. */
+export function Lens({ end }: { end: number }) {
+  const tip = RIGHT + (end / 100) * (RIGHT - LEFT);
+  return (
+    <path
+      d={`M${RIGHT} 53L${LEFT} ${BASE}H${RIGHT}L${tip} 53Z`}
+      fill="var(--hp-colors-steel-subtle)"
+      stroke="var(--hp-colors-border)"
+    />
+  );
+}
+
+/** The enlarged scale in tenths of a percent, its words every half but where the limit stands. */
+export function MainScale({ end, limit }: { end: number; limit: number }) {
+  const halves = mainLines(end).filter((_, i) => i % 5 === 0);
   return (
     <g>
-      <path d={`M${LEFT} 104H${RIGHT}`} stroke={ink} strokeWidth="1.5" />
+      <path d={`M${LEFT} ${BASE}H${RIGHT}`} stroke={ink} strokeWidth="1.5" />
       {mainLines(end).map((pct, i) => (
-        <path key={i} d={`M${along(pct, end)} 104v${i % 5 ? -9 : -16}`} stroke={ink} strokeWidth="1.25" />
-      ))}
-      {mainLines(end)
-        .filter((_, i) => i % 5 === 0)
-        .map((pct, i, all) => (
-          <text
-            key={pct}
-            x={along(pct, end)}
-            y="82"
-            fontSize="15"
-            fill={quiet}
-            textAnchor={i === 0 ? 'start' : i === all.length - 1 ? 'end' : 'middle'}
-          >
-            {pct === 0 ? '0 %' : pct}
-          </text>
-        ))}
-    </g>
-  );
-}
-
-/** The slide at the value: its line that meets the main scale tells the hundredths. */
-export function Slide({ value, end }: { value: number; end: number }) {
-  const lines = slideLines(value);
-  const [from, to] = [along(lines[0]!, end), along(lines[10]!, end)];
-  return (
-    <g>
-      <rect
-        x={from - 6}
-        y="104"
-        width={to - from + 12}
-        height="32"
-        rx="3"
-        fill="var(--hp-colors-steel-subtle)"
-        stroke={steel}
-      />
-      {lines.map((pct, i) => (
         <path
-          key={i}
-          d={`M${along(pct, end)} 104v${i === meeting(value) ? 16 : i % 5 ? 8 : 11}`}
-          stroke={i === meeting(value) ? steel : ink}
-          strokeWidth={i === meeting(value) ? 3 : 1.25}
+          key={pct}
+          d={`M${along(pct, end)} ${BASE}v${i % 5 ? -9 : -16}`}
+          stroke={ink}
+          strokeWidth="1.25"
         />
       ))}
-      <text
-        x={along(lines[meeting(value)]!, end)}
-        y="132"
-        fontSize="13"
-        fontWeight="600"
-        textAnchor="middle"
-        fill={steel}
-      >
-        {meeting(value)}
-      </text>
-      <path d={`M${from} 106l-5.500 10h11z`} fill={steel} />
+      {halves
+        .filter((pct) => Math.abs(along(pct, end) - along(limit, end)) > 20)
+        .map((pct) => (
+          <text key={pct} x={along(pct, end)} y={BASE - 20} fontSize="14" fill={quiet} textAnchor="middle">
+            {pct === 0 ? 'new' : pct}
+          </text>
+        ))}
     </g>
   );
 }

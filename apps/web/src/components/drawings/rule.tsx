@@ -1,7 +1,8 @@
 import { chakra, Text } from '@chakra-ui/react';
 import { elongation } from '../../app/format';
-import { ChainOnRule, MainScale, Slide } from './rule-parts';
-import { along, LEFT, RIGHT, scaleEnd } from './vernier';
+import { BASE, ChainOnRule, Lens, MainScale } from './rule-parts';
+import { Slide } from './rule-slide';
+import { along, scaleEnd } from './vernier';
 
 interface RuleProps {
   /** Elongation, %. */
@@ -27,34 +28,34 @@ export function ruleWords({ value, limit, band }: Pick<RuleProps, 'value' | 'lim
   return `${elongation(value)} longer than new${range}, ${place} ${elongation(limit)}`;
 }
 
-/** A 12-inch rule on 24 pitches, and its end as a vernier on which half a percent is plain to see. */
+/** A 12-inch rule on 24 pitches, and its end enlarged to a vernier on which half a percent is plain to see. */
 export function Rule({ value, limit, band, label, bare = false }: RuleProps) {
   const end = Math.max(scaleEnd(value), scaleEnd(limit), scaleEnd(band?.p90 ?? 0));
   const words = ruleWords({ value, limit, band });
   const at = along(limit, end);
+  const [low, high] = [band?.p10 ?? 0, band?.p90 ?? 0].map((pct) => along(Math.max(0, pct), end)) as [
+    number,
+    number,
+  ];
   return (
     <div>
-      <Drawing viewBox="0 0 480 140" role="img" aria-label={label ? `${label}: ${words}` : words}>
+      <Drawing viewBox="0 0 480 168" role="img" aria-label={label ? `${label}: ${words}` : words}>
+        <Lens end={end} />
         <ChainOnRule value={value} />
-        <path
-          d={`M${RIGHT} 44L${LEFT} 104M${RIGHT + 8} 44L${RIGHT} 104`}
-          stroke="var(--hp-colors-border-emphasized)"
-          strokeDasharray="3 4"
-        />
         {band && (
           <rect
-            x={along(Math.max(0, band.p10), end)}
-            y="90"
-            width={along(Math.max(0, band.p90), end) - along(Math.max(0, band.p10), end)}
-            height="14"
+            x={low}
+            y={BASE - 16}
+            width={Math.max(2, high - low)}
+            height="16"
             fill="var(--hp-colors-steel-muted)"
           />
         )}
-        <MainScale end={end} />
+        <MainScale end={end} limit={limit} />
         <Slide value={value} end={end} />
-        <path d={`M${at} 66v38`} stroke="var(--hp-colors-dryness-dry)" strokeWidth="2.5" />
-        <text x={at + 6} y="66" fontSize="15" fontWeight="600" fill="var(--hp-colors-fg)">
-          limit {limit}
+        <path d={`M${at} ${BASE - 42}V${BASE}`} stroke="var(--hp-colors-dryness-dry)" strokeWidth="3" />
+        <text x={at + 6} y={BASE - 31} fontSize="15" fontWeight="600" fill="var(--hp-colors-fg)">
+          limit {limit} %
         </text>
       </Drawing>
       {!bare && (
