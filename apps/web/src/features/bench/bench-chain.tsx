@@ -8,7 +8,7 @@ import { LoadingState } from '../../components/loading-state';
 import { Notice } from '../../components/notice';
 import { PageHeader } from '../../components/page-header';
 import { regimeWords } from '../../components/trade-words';
-import { chainQuery } from './api/chain';
+import { chainQuery } from '../chains/api/chain';
 import { ChainNow } from './chain-now';
 import { Recorded } from './recorded';
 import { TreatmentSheet } from './treatment-sheet';

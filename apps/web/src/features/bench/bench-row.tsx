@@ -4,7 +4,9 @@ import { Link } from 'react-router-dom';
 import { useFormat } from '../../app/use-format';
 import { LinkStrip } from '../../components/drawings/link-strip';
 import { regimeWords } from '../../components/trade-words';
+import { dueWords } from '../chains/chain-words';
 import { ElongationLine } from './elongation-line';
+import { dueSoon } from './soonest';
 
 const Tile = chakra(Link, {
   base: {
@@ -16,8 +18,6 @@ const Tile = chakra(Link, {
     _hover: { borderColor: 'border.control', bg: 'bg.muted' },
   },
 });
-
-const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** A chain on the bench list: whose it is, how dry, when due, how far lengthened. */
 export function BenchRow({ chain }: { chain: Chain }) {
@@ -45,9 +45,12 @@ export function BenchRow({ chain }: { chain: Chain }) {
             <>
               <LinkStrip share={state.shareUsed} label={chain.label} />
               <Box gridColumn={{ md: '1 / -1', xl: 'auto' }}>
-                <Text fontWeight="semibold">
-                  {state.lubrication ? capital(format.window(state.lubrication)) : 'No treatment known yet'}
-                </Text>
+                {dueSoon(state).map(({ kind, window }) => (
+                  <Text key={kind}>
+                    <strong>{kind === 'replacement' ? 'Replace' : dueWords[chain.regime]}</strong>{' '}
+                    {format.window(window)}
+                  </Text>
+                ))}
                 <ElongationLine chain={chain} state={state} />
               </Box>
             </>

@@ -10,7 +10,7 @@ export function ElongationLine({ chain, state }: { chain: Pick<Chain, 'limitPct'
   const past = state.chancePast >= WORTH_SAYING;
   return (
     <Text color={past ? 'fg' : 'fg.muted'} fontVariantNumeric="tabular-nums">
-      Lengthened {elongation(state.elongationPct)}, limit {elongation(chain.limitPct)}
+      Lengthened {elongation(Math.max(0, state.elongationPct))}, limit {elongation(chain.limitPct)}
       {past && (
         <Text as="span" fontWeight="semibold">
           {' '}

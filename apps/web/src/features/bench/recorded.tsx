@@ -7,7 +7,7 @@ import { DueWindow } from '../../components/drawings/due-window';
 import { LinkStrip } from '../../components/drawings/link-strip';
 import { toastDone, toastError } from '../../components/toaster';
 import { treatmentWords } from '../../components/trade-words';
-import { chainQuery } from './api/chain';
+import { chainQuery } from '../chains/api/chain';
 import { deleteTreatment } from './api/treatments';
 import { ClosedReminder } from './closed-reminder';
 
