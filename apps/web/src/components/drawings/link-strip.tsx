@@ -80,7 +80,7 @@ export function LinkStrip({ share, label, bare = false, decorative = false }: Li
         <path d={`M${end - 5} 1h10l-5 8zM${end - 5} 51h10l-5-8z`} fill="var(--hp-colors-fg)" />
       </Drawing>
       {!bare && !decorative && (
-        <Flex gap="3" mt="2" align="baseline">
+        <Flex gap="3" mt="2" align="center" wrap="wrap">
           <StateWord dryness={drynessOf(share)} />
           <Text color="fg.muted">{percent(share)} of the treatment used</Text>
         </Flex>

@@ -53,8 +53,8 @@ export function Rule({ value, limit, band, label, bare = false }: RuleProps) {
         )}
         <MainScale end={end} limit={limit} />
         <Slide value={value} end={end} />
-        <path d={`M${at} ${BASE - 42}V${BASE}`} stroke="var(--hp-colors-dryness-dry)" strokeWidth="3" />
-        <text x={at + 6} y={BASE - 31} fontSize="15" fontWeight="600" fill="var(--hp-colors-fg)">
+        <path d={`M${at} ${BASE - 58}V${BASE}`} stroke="var(--hp-colors-dryness-dry)" strokeWidth="3" />
+        <text x={at + 6} y={BASE - 45} fontSize="15" fontWeight="600" fill="var(--hp-colors-fg)">
           limit {limit} %
         </text>
       </Drawing>
