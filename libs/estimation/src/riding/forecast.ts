@@ -1,102 +1,109 @@
-import { seededRandom } from '../math/random';
-import { weightedBand } from '../math/weighted';
-import { Day, LEVELS, PlannedRiding, RidingForecast, RidingModel } from '../types';
-import { Block, BLOCK_DAYS, dailyKm, seasonWeight, weightedBlocks } from './blocks';
-import { BlockModel, defaultRidingModel, HORIZON_DAYS } from './model';
+import { Band, Day, LEVELS, PlannedRiding, RidingForecast, RidingModel } from '../types';
+import { dailyLog, DailyLog } from './daily-log';
+import { defaultRidingModel } from './default-model';
+import { logFeatures } from './features';
+import { HORIZON_DAYS, LearnedRiding, TAUGHT_KM, taughtHorizon } from './model';
+import { isQuiet } from './quiet';
+import { quantilesAt } from './quantiles';
+import { reachFeatures, simplePaths } from './reach';
 
-const PATHS = 120;
+/** Distances at which the quantiles are worked out; others are read between them on a log-log scale. */
+const NODES_KM = [10, 25, 50, 100, 150, 220, 300, 450, 600, 800, 1000, 1500, 2200, 3000] as const;
+const LAST_TAUGHT = TAUGHT_KM[TAUGHT_KM.length - 1]!;
+const FIRST_TAUGHT = TAUGHT_KM[0];
+/** A quiet log says less of what comes: its windows are this much wider, on the log scale. */
+const QUIET_WIDER = 1.5;
 
-function pick(blocks: readonly Block[], weights: readonly number[], total: number, u: number): Block {
-  let rest = u * total;
-  for (let i = 0; i < blocks.length; i++) {
-    rest -= weights[i]!;
-    if (rest <= 0) return blocks[i]!;
-  }
-  return blocks[blocks.length - 1]!;
-}
-
-/** Cumulative km at the end of each day ahead, on each of PATHS possible futures made of blocks of the past. */
-function futures(blocks: readonly Block[], today: Day, model: BlockModel): Float64Array[] {
-  const random = seededRandom(1);
-  const steps = Math.ceil(HORIZON_DAYS / BLOCK_DAYS);
-  const paths = Array.from({ length: PATHS }, () => new Float64Array(steps * BLOCK_DAYS));
-  for (let step = 0; step < steps; step++) {
-    const season = (today + step * BLOCK_DAYS + BLOCK_DAYS / 2) % 365.25;
-    const weights = blocks.map((block) => seasonWeight(block, season, model.seasonFavour));
-    const total = weights.reduce((sum, w) => sum + w, 0);
-    for (const path of paths) {
-      const { km } = pick(blocks, weights, total, random());
-      let sum = step === 0 ? 0 : path[step * BLOCK_DAYS - 1]!;
-      for (let d = 0; d < BLOCK_DAYS; d++) path[step * BLOCK_DAYS + d] = sum += km[d]!;
-    }
-  }
-  return paths;
-}
-
-/** First index at which an ascending array reaches `km`. */
-function firstReaching(path: Float64Array, km: number): number {
-  let low = 0;
-  let high = path.length;
-  while (low < high) {
-    const middle = (low + high) >> 1;
-    if (path[middle]! >= km) high = middle;
-    else low = middle + 1;
-  }
-  return low;
-}
-
-function addPlanned(paths: Float64Array[], today: Day, planned: readonly PlannedRiding[]): void {
-  for (const { from, to, km } of planned) {
-    const daily = km / (to - from + 1);
-    for (const path of paths) {
-      let extra = 0;
-      for (let d = 0; d < path.length; d++) {
-        const day = today + 1 + d;
-        if (day >= from && day <= to) extra += daily;
-        path[d]! += extra;
-      }
-    }
-  }
-}
-
-/** The riding ahead of one bike: possible futures resampled from four-week blocks of its own log, recency and season favoured. */
+/**
+ * The riding ahead of one bike: for any distance the days it takes, as quantiles learned from how other riders' logs
+ * went on (see LearnedRiding). Rides after `today` are left out; no rides at all gives an ordinary rider's wide answer.
+ */
 export function forecastRiding(
   rides: readonly { day: Day; km: number }[],
   today: Day,
   model: RidingModel,
   planned: readonly PlannedRiding[],
 ): RidingForecast {
-  const settings = { ...defaultRidingModel, ...model } as BlockModel;
-  const paths = futures(weightedBlocks(rides, today, settings), today, settings);
-  addPlanned(paths, today, planned);
-  const ones = paths.map(() => 1);
-  return {
-    daysToReach(km) {
-      if (km <= 0) return LEVELS.map(() => 0);
-      const days = paths
-        .map((path) => Math.min(firstReaching(path, km) + 1, HORIZON_DAYS))
-        .sort((a, b) => a - b);
-      return LEVELS.map((level) => days[Math.min(Math.floor(level * PATHS), PATHS - 1)]!);
-    },
-    kmPerWeek: weightedBand(
-      paths.map((path) => path[BLOCK_DAYS - 1]! / 4),
-      ones,
-    ),
-    quiet: isQuiet(rides, today),
-  };
+  const learned = isLearned(model) ? model : defaultRidingModel;
+  const log = dailyLog(rides, today);
+  const quiet = isQuiet(log);
+  const table = quantileTable(log, quiet ? { ...learned, spread: learned.spread * QUIET_WIDER } : learned);
+  const daysToReach = (km: number) =>
+    LEVELS.map((_, l) => withPlans(planned, today, km, (rest) => readTable(table, l, rest)));
+  return { daysToReach, kmPerWeek: kmPerWeek(table), quiet };
 }
 
-/** A log is quiet when the pause is longer than 21 days and than nineteen in twenty of this rider's pauses. */
-function isQuiet(rides: readonly { day: Day; km: number }[], today: Day): boolean {
-  const { km } = dailyKm(rides, today);
-  const gaps: number[] = [];
-  let gap = 0;
-  for (const x of km) {
-    if (x > 0) {
-      gaps.push(gap);
-      gap = 0;
-    } else gap++;
+const isLearned = (model: RidingModel): model is LearnedRiding =>
+  Array.isArray(model.location) && Array.isArray(model.season);
+
+/** Quantiles at each node: rows by node, made to rise with the distance. */
+function quantileTable(log: DailyLog, model: LearnedRiding): number[][] {
+  const o = log.km.length;
+  const paths = simplePaths(log, o, model.season, HORIZON_DAYS);
+  const base = o > 0 ? logFeatures(log, o) : model.mean.slice(0, model.mean.length - paths.length);
+  const at = (km: number) => {
+    const reach = o > 0 ? reachFeatures(paths, km, taughtHorizon(km)) : model.mean.slice(base.length);
+    return quantilesAt(model, [...base, ...reach], km);
+  };
+  const first = at(FIRST_TAUGHT);
+  const last = at(LAST_TAUGHT);
+  const rows = NODES_KM.map((km) => {
+    if (km < FIRST_TAUGHT) return first.map((days) => Math.max(days * (km / FIRST_TAUGHT), 1));
+    return km <= LAST_TAUGHT ? at(km) : last.map((days) => days * (km / LAST_TAUGHT));
+  });
+  for (let i = 1; i < rows.length; i++) rows[i] = rows[i]!.map((days, l) => Math.max(days, rows[i - 1]![l]!));
+  return rows;
+}
+
+/** Days at level `l` until `km` are ridden, read between the nodes and in proportion beyond them. */
+function readTable(table: readonly number[][], l: number, km: number): number {
+  if (km <= 0) return 0;
+  const last = NODES_KM.length - 1;
+  if (km >= NODES_KM[last]!) return Math.min(table[last]![l]! * (km / NODES_KM[last]!), HORIZON_DAYS);
+  if (km <= NODES_KM[0]) return Math.max(table[0]![l]! * (km / NODES_KM[0]), 1);
+  let i = 1;
+  while (NODES_KM[i]! < km) i++;
+  const share = Math.log(km / NODES_KM[i - 1]!) / Math.log(NODES_KM[i]! / NODES_KM[i - 1]!);
+  const days = table[i - 1]![l]! ** (1 - share) * table[i]![l]! ** share;
+  return Math.min(days, HORIZON_DAYS);
+}
+
+/** The first day by which ordinary riding and what is planned together reach `km`. */
+function withPlans(
+  planned: readonly PlannedRiding[],
+  today: Day,
+  km: number,
+  days: (km: number) => number,
+): number {
+  if (planned.length === 0) return days(km);
+  const plannedBy = (d: number) =>
+    planned.reduce((sum, plan) => {
+      const from = Math.max(plan.from, today + 1);
+      const length = plan.to - plan.from + 1;
+      return sum + (plan.km / length) * Math.max(Math.min(today + d, plan.to) - from + 1, 0);
+    }, 0);
+  let low = 0;
+  let high = Math.ceil(days(km));
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (days(km - plannedBy(middle)) <= middle) high = middle;
+    else low = middle + 1;
   }
-  const usual = gaps.sort((a, b) => a - b)[Math.floor(gaps.length * 0.95)] ?? 0;
-  return rides.length > 0 && gap > Math.max(21, usual);
+  return low;
+}
+
+/** Km a week over four weeks: the distances that take 28 days at the levels 0.9, 0.5 and 0.1. */
+function kmPerWeek(table: readonly number[][]): Band {
+  const within28 = (l: number) => {
+    let low = 0;
+    let high = 4000;
+    while (high - low > 0.5) {
+      const middle = (low + high) / 2;
+      if (readTable(table, l, middle) <= 28) low = middle;
+      else high = middle;
+    }
+    return low / 4;
+  };
+  const level = (p: number) => LEVELS.indexOf(p as (typeof LEVELS)[number]);
+  return { p10: within28(level(0.9)), p50: within28(level(0.5)), p90: within28(level(0.1)) };
 }

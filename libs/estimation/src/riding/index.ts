@@ -1,2 +1,5 @@
-export { defaultRidingModel, HORIZON_DAYS } from './model';
+export { defaultRidingModel } from './default-model';
+export { fitRidingModel } from './fit';
 export { forecastRiding } from './forecast';
+export type { RiderLog } from './lessons';
+export { HORIZON_DAYS } from './model';

@@ -3,21 +3,28 @@ import type { RidingModel } from '../types';
 /** Forecasts look two years ahead. */
 export const HORIZON_DAYS = 731;
 
-export interface BlockModel extends RidingModel {
-  /** Weight of a block halves with every so many days of age. */
-  halfLifeDays: number;
-  /** How much more a block of the same season weighs. */
-  seasonFavour: number;
-  /** Km a week of riders in general: what a short log is mixed with. Log-normal. */
-  fleetWeekKm: { median: number; logSd: number };
-  /** How many blocks of 28 days the fleet counts for. */
-  fleetBlocks: number;
-}
+/** Distances the model is taught at, km; between them it interpolates, beyond them it goes on in proportion. */
+export const TAUGHT_KM = [150, 300, 600, 1000, 1500, 2200] as const;
 
-export const defaultRidingModel: BlockModel = {
-  version: 'blocks-1',
-  halfLifeDays: 60,
-  seasonFavour: 3,
-  fleetWeekKm: { median: 50, logSd: 0.9 },
-  fleetBlocks: 1,
-};
+/** Days after which an outcome counts as "not within the horizon" when teaching: 180 at 300 km, 540 at 1,500 km. */
+export const taughtHorizon = (km: number): number =>
+  Math.round(180 * (km / 300) ** (Math.log(3) / Math.log(5)));
+
+/**
+ * Quantile l of the days to reach x km: exp(location(f) + spread · exp(scale(f)) · z_l), where f are the features of the
+ * log, standardised, and their products with log x.
+ */
+export interface LearnedRiding extends RidingModel {
+  /** Riding on each day of the year relative to the mean. */
+  season: number[];
+  mean: number[];
+  sd: number[];
+  location: number[];
+  scale: number[];
+  z: number[];
+  /** Factor on the width, so that the windows hold on riders the model was not taught on. */
+  spread: number;
+  /** Riders and origins it was taught on. */
+  riders: number;
+  origins: number;
+}

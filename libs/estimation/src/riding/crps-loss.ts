@@ -1,0 +1,65 @@
+import { LEVELS } from '../types';
+import type { Objective } from './lbfgs';
+
+export interface Lesson {
+  row: Float64Array;
+  days: number;
+  horizon: number;
+  weight: number;
+}
+
+export interface Penalties {
+  location: number;
+  scale: number;
+}
+
+export const MAX_LOG_DAYS = 9;
+
+/**
+ * Mean pinball loss over LEVELS (half the CRPS), in days capped at each lesson's horizon, plus ridge penalties; x holds
+ * the location's coefficients, the scale's without its intercept, and z.
+ */
+export function crpsObjective(
+  lessons: readonly Lesson[],
+  scaleSize: number,
+  penalties: Penalties,
+): Objective {
+  const size = lessons[0]!.row.length;
+  const total = lessons.reduce((sum, { weight, days }) => sum + weight * days, 0) * LEVELS.length;
+  const zAt = size + scaleSize - 1;
+  return (x, gradient) => {
+    gradient.fill(0);
+    let loss = 0;
+    for (const { row, days, horizon, weight } of lessons) {
+      let location = 0;
+      for (let i = 0; i < size; i++) location += row[i]! * x[i]!;
+      let logScale = 0;
+      for (let i = 1; i < scaleSize; i++) logScale += row[i]! * x[size + i - 1]!;
+      const scale = Math.exp(Math.min(Math.max(logScale, -3), 3));
+      let gLocation = 0;
+      let gScale = 0;
+      for (let l = 0; l < LEVELS.length; l++) {
+        const z = x[zAt + l]!;
+        const level = LEVELS[l]!;
+        const q = Math.exp(Math.min(Math.max(location + scale * z, -2), MAX_LOG_DAYS));
+        const miss = days - Math.min(q, horizon);
+        loss += weight * (miss >= 0 ? level * miss : (level - 1) * miss);
+        if (q >= horizon || miss === 0) continue;
+        const g = weight * q * (miss > 0 ? -level : 1 - level);
+        gLocation += g;
+        gScale += g * z * scale;
+        gradient[zAt + l]! += g * scale;
+      }
+      for (let i = 0; i < size; i++) gradient[i]! += gLocation * row[i]!;
+      for (let i = 1; i < scaleSize; i++) gradient[size + i - 1]! += gScale * row[i]!;
+    }
+    for (let i = 0; i < gradient.length; i++) gradient[i]! /= total;
+    let value = loss / total;
+    for (let i = 1; i < zAt; i++) {
+      const penalty = i < size ? penalties.location : penalties.scale;
+      value += (penalty * x[i]! ** 2) / 2;
+      gradient[i]! += penalty * x[i]!;
+    }
+    return value;
+  };
+}
