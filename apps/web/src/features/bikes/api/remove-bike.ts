@@ -1,0 +1,4 @@
+import { done } from '@halfpitch/contracts';
+import { request } from '../../../app/api';
+
+export const removeBike = (id: string) => request(`/bikes/${id}`, { method: 'DELETE', schema: done });

@@ -1,0 +1,22 @@
+import { rideImport } from '@halfpitch/contracts';
+import type { RideImport, Surface, Weather } from '@halfpitch/contracts';
+import { upload } from '../../../app/upload';
+
+export interface ImportChoice {
+  bikeId: string;
+  /** For what the file does not say. */
+  surface: Surface;
+  weather: Weather;
+}
+
+/** Sends a file; the server reads it afterwards. */
+export function addImport(
+  file: File,
+  choice: ImportChoice,
+  onProgress: (share: number) => void,
+): Promise<RideImport> {
+  const form = new FormData();
+  for (const [name, value] of Object.entries(choice)) form.append(name, String(value));
+  form.append('file', file);
+  return upload('/imports', form, { schema: rideImport, onProgress });
+}

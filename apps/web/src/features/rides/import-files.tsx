@@ -1,0 +1,104 @@
+import { Button, Stack, Text } from '@chakra-ui/react';
+import { MAX_IMPORT_BYTES } from '@halfpitch/contracts';
+import type { Bike, Surface, Weather } from '@halfpitch/contracts';
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { Link, useSearchParams } from 'react-router-dom';
+import { useSession } from '../../app/session';
+import { EmptyState } from '../../components/empty-state';
+import { Tiles } from '../../components/fields/tiles';
+import { FileDrop } from '../../components/file-drop';
+import { Loaded } from '../../components/loaded';
+import { PageHeader } from '../../components/page-header';
+import { surfaceWords, weatherWords } from '../../components/trade-words';
+import { bikeQuery } from '../bikes/api/bike';
+import { bikesQuery } from '../bikes/api/bikes';
+import { optionsOf } from '../chains/options';
+import { ImportList } from './import-list';
+import { useUploads } from './use-uploads';
+import { usualSurface } from './usual-rides';
+
+const MEGABYTES = MAX_IMPORT_BYTES / 1024 / 1024;
+
+function Importer({ bikes, first }: { bikes: Bike[]; first: Bike }) {
+  const [bikeId, setBikeId] = useState(first.id);
+  const bike = bikes.find(({ id }) => id === bikeId) ?? first;
+  const [ground, setGround] = useState<Surface | null>(null);
+  const surface = ground ?? usualSurface(bike, []);
+  const [weather, setWeather] = useState<Weather>('unknown');
+  const { uploads, add, retry } = useUploads();
+  return (
+    <Stack gap="6">
+      {bikes.length > 1 && (
+        <Tiles
+          name="bike"
+          label="Ridden on"
+          options={bikes.map(({ id, name }) => ({ value: id, label: name }))}
+          value={bikeId}
+          onChange={setBikeId}
+          minTileWidth="8rem"
+        />
+      )}
+      <Tiles
+        name="surface"
+        label="Ground, where the file does not say"
+        options={optionsOf(surfaceWords)}
+        value={surface}
+        onChange={setGround}
+      />
+      <Tiles
+        name="weather"
+        label="Weather, where the file does not say"
+        options={optionsOf(weatherWords)}
+        value={weather}
+        onChange={setWeather}
+      />
+      <FileDrop
+        label="Drop ride files here, or choose them"
+        help={`GPX, TCX, FIT and CSV, also packed as .zip or .gz; each up to ${MEGABYTES} MB`}
+        accept=".gpx,.tcx,.fit,.csv,.zip,.gz"
+        multiple
+        onFiles={(files) => add(files, { bikeId, surface, weather })}
+      />
+      <ImportList uploads={uploads} onRetry={retry} />
+    </Stack>
+  );
+}
+
+/** Many rides at once, from files. */
+export function ImportFiles() {
+  const { riderId } = useSession();
+  const [search] = useSearchParams();
+  const wanted = search.get('bike');
+  const named = useQuery({ ...bikeQuery(wanted ?? ''), enabled: riderId === null && wanted !== null });
+  const of = riderId ?? named.data?.riderId;
+  const bikes = useQuery({ ...bikesQuery({ riderId: of }), enabled: of !== undefined });
+  if (riderId === null && wanted === null)
+    return <EmptyState title="Whose rides are they?">Open the rider’s bike first.</EmptyState>;
+  return (
+    <>
+      <PageHeader
+        title="Add rides from files"
+        lead="A ride that is there already is not counted twice, whichever device or format it came from."
+      />
+      <Loaded query={bikes}>
+        {({ items }) => {
+          const first = items.find(({ id }) => id === wanted) ?? items[0];
+          if (first) return <Importer bikes={items} first={first} />;
+          return (
+            <EmptyState
+              title="No bike yet"
+              action={
+                <Button asChild>
+                  <Link to="/bikes/new">Add a bike</Link>
+                </Button>
+              }
+            >
+              <Text>Rides belong to a bike: add yours first.</Text>
+            </EmptyState>
+          );
+        }}
+      </Loaded>
+    </>
+  );
+}
