@@ -31,7 +31,14 @@ export function ConfirmDialog({ trigger, title, children, confirm, final, onConf
     }
   };
   return (
-    <Dialog.Root role="alertdialog" placement="center" open={open} onOpenChange={(to) => setOpen(to.open)}>
+    <Dialog.Root
+      role="alertdialog"
+      placement="center"
+      lazyMount
+      unmountOnExit
+      open={open}
+      onOpenChange={(to) => setOpen(to.open)}
+    >
       <Dialog.Trigger asChild>{trigger}</Dialog.Trigger>
       <Portal>
         <Dialog.Backdrop />
