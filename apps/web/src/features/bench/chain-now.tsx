@@ -33,7 +33,7 @@ export function ChainNow({ chain }: { chain: Chain }) {
             {state.lubrication ? (
               <DueWindow {...state.lubrication} today={format.today} label="Treatment due" />
             ) : (
-              <Text>Not known before the first treatment.</Text>
+              <Text>It lies in the box: its treatment does not run out there.</Text>
             )}
             <Box mt="2">
               <ElongationLine chain={chain} state={state} />

@@ -56,7 +56,11 @@ export function Recorded({ treatment, before, onUndone, onAnother }: RecordedPro
           <LinkStrip share={state.shareUsed} />
           <Box>
             <Text fontWeight="semibold">Due again</Text>
-            {state.lubrication && <DueWindow {...state.lubrication} today={format.today} label="Due again" />}
+            {state.lubrication ? (
+              <DueWindow {...state.lubrication} today={format.today} label="Due again" />
+            ) : (
+              <Text>Once it is on a bike again: in the box its treatment does not run out.</Text>
+            )}
             {before?.lubrication && (
               <Text color="fg.muted">It was {format.window(before.lubrication)} before.</Text>
             )}
