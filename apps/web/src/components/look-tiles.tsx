@@ -8,5 +8,14 @@ const options = colorModes.map((value) => ({ value, label: words[value] }));
 /** Light or dark; kept on this device. */
 export function LookTiles() {
   const mode = useColorMode();
-  return <Tiles name="look" label="Look" options={options} value={mode} onChange={setColorMode} />;
+  return (
+    <Tiles
+      minTileWidth="4rem"
+      name="look"
+      label="Look"
+      options={options}
+      value={mode}
+      onChange={setColorMode}
+    />
+  );
 }

@@ -4,7 +4,7 @@ import { NavLink } from 'react-router-dom';
 import { LookTiles } from '../../components/look-tiles';
 import { toastError } from '../../components/toaster';
 import { useSession, useSignOut } from '../session';
-import { hasSidebar, targetStyles } from './nav-styles';
+import { besideNav, targetStyles } from './nav-styles';
 import { panelLine, PopPanel } from './pop-panel';
 import { WorkshopSwitch } from './workshop-switch';
 
@@ -15,9 +15,8 @@ export function AccountMenu() {
   const { account, role, workshop } = useSession();
   const signOut = useSignOut();
   const buttonStyles = { ...targetStyles(role), display: { base: 'none', md: 'flex' } };
-  const place = { bottom: 4, left: { md: '28', lg: hasSidebar(role) ? '62' : '28' } };
   return (
-    <PopPanel label="Account" icon={UserRound} buttonStyles={buttonStyles} place={place}>
+    <PopPanel label="Account" icon={UserRound} buttonStyles={buttonStyles} place={besideNav(role)}>
       <Box px="3" pt="1" pb="2">
         <Text fontWeight="semibold">{account.name}</Text>
         <Text color="fg.muted" textStyle="sm">

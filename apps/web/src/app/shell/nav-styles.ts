@@ -1,6 +1,9 @@
 import type { Role } from '@halfpitch/contracts';
 import type { SystemStyleObject } from '@chakra-ui/react';
 
+const RAIL = '6.75rem';
+const LIST = '15rem';
+
 /** Whether a role, on a wide screen, gets the list with text or stays with the rail of large targets. */
 export const hasSidebar = (role: Role): boolean => role === 'desk' || role === 'owner';
 
@@ -17,7 +20,7 @@ export function navStyles(role: Role): SystemStyleObject {
     gap: { base: 0, md: 1 },
     height: { md: '100dvh' },
     overflowY: { md: 'auto' },
-    width: { md: '26', lg: hasSidebar(role) ? '60' : '26' },
+    width: { md: RAIL, lg: hasSidebar(role) ? LIST : RAIL },
     flexShrink: 0,
     px: { md: 2, lg: hasSidebar(role) ? 3 : 2 },
     py: { md: 4 },
@@ -38,7 +41,7 @@ export function targetStyles(role: Role): SystemStyleObject {
     alignItems: 'center',
     justifyContent: { base: 'center', lg: hasSidebar(role) ? 'flex-start' : 'center' },
     gap: { base: 1, lg: hasSidebar(role) ? 3 : 1 },
-    minHeight: { base: '16', md: '18', lg: hasSidebar(role) ? '11' : '18' },
+    minHeight: { base: '16', md: '4.5rem', lg: hasSidebar(role) ? '11' : '4.5rem' },
     px: { base: 1, lg: hasSidebar(role) ? 3 : 1 },
     borderRadius: { md: 'l2' },
     color: 'fg.muted',
@@ -56,3 +59,9 @@ export function targetStyles(role: Role): SystemStyleObject {
     },
   };
 }
+
+/** Where a panel opens beside the rail or the list. */
+export const besideNav = (role: Role): SystemStyleObject => ({
+  bottom: 4,
+  left: { md: `calc(${RAIL} + 0.5rem)`, lg: `calc(${hasSidebar(role) ? LIST : RAIL} + 0.5rem)` },
+});

@@ -56,8 +56,8 @@ export function Tiles<V extends string>(props: TilesProps<V>) {
   const { name, label, options, value, onChange, error, minTileWidth = '5.5rem' } = props;
   const group = useId();
   return (
-    <Fieldset.Root invalid={Boolean(error)}>
-      <Fieldset.Legend fontSize="md" fontWeight="semibold" color="fg" mb="1.5">
+    <Fieldset.Root invalid={Boolean(error)} spaceY="1.5">
+      <Fieldset.Legend fontSize="md" fontWeight="semibold" color="fg">
         {label}
       </Fieldset.Legend>
       <SimpleGrid minChildWidth={minTileWidth} gap="2" width="full">

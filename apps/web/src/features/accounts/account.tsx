@@ -3,14 +3,13 @@ import { useSession, useSignOut } from '../../app/session';
 import { LookTiles } from '../../components/look-tiles';
 import { PageHeader } from '../../components/page-header';
 import { toastError } from '../../components/toaster';
-
 import { PasswordSettings } from './password-settings';
 import { PersonSettings } from './person-settings';
 import { WorkshopChoice } from './workshop-choice';
 
 /** One's own settings. */
 export function Account() {
-  const { account } = useSession();
+  const { account, workshops } = useSession();
   const signOut = useSignOut();
   const leave = (where: 'here' | 'everywhere') => void signOut(where).catch(toastError);
   return (
@@ -19,7 +18,7 @@ export function Account() {
       <Stack gap="8" maxWidth="30rem" separator={<Separator />}>
         <PersonSettings />
         <LookTiles />
-        <WorkshopChoice />
+        {workshops.length > 1 && <WorkshopChoice />}
         <PasswordSettings />
         <Flex gap="3" wrap="wrap">
           <Button onClick={() => leave('here')} variant="outline">

@@ -7,7 +7,6 @@ import { toastError } from '../../components/toaster';
 export function WorkshopChoice() {
   const { workshop, workshops } = useSession();
   const choose = useChooseWorkshop();
-  if (workshops.length < 2) return null;
   return (
     <Stack as="section" gap="3" aria-labelledby="workshops">
       <Heading as="h2" size="lg" id="workshops">
