@@ -17,7 +17,7 @@ export function simplePaths(log: DailyLog, o: number, season: readonly number[],
     return (kmBetween(log, o - span, o) + 2.1) / past;
   };
   const shape = summed(days, (d) => seasonal(today + d));
-  const carried = [28, 90, 365].map((w) => shape.map((x) => x * rateOver(w)));
+  const carried = [28, 90, 365].map(rateOver).map((rate) => shape.map((x) => x * rate));
   if (o < YEAR + 28) return [...carried, carried[2]!, carried[2]!];
   const lastYear = summed(days, (d) => log.km[o - YEAR + (d % YEAR)]!);
   const ratio = (kmBetween(log, o - 90, o) + 20) / (kmBetween(log, o - YEAR - 90, o - YEAR) + 20);
