@@ -1,6 +1,7 @@
 import { Box, Link, Text } from '@chakra-ui/react';
 import type { Reminder } from '@halfpitch/contracts';
 import { Link as RouterLink } from 'react-router-dom';
+import { windowWords } from '../../app/format';
 import { useFormat } from '../../app/use-format';
 import type { Column } from '../../components/data-table';
 import { ReminderActs } from './reminder-acts';
@@ -27,10 +28,10 @@ function StateCell({ reminder }: { reminder: Reminder }) {
   );
 }
 
-/** The window as the letter states it. */
+/** The window as the letter states it, seen from the day it was written. */
 function WindowCell({ reminder }: { reminder: Reminder }) {
-  const format = useFormat();
-  return <Text maxWidth={{ md: '16rem' }}>{format.window(reminder.window)}</Text>;
+  const written = reminder.createdAt.slice(0, 10);
+  return <Text maxWidth={{ md: '16rem' }}>{windowWords(reminder.window, written)}</Text>;
 }
 
 export const reminderColumns: Column<Reminder>[] = [
