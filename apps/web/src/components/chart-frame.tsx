@@ -1,9 +1,11 @@
 import { Box, Button, Flex, Heading, Skeleton, Text } from '@chakra-ui/react';
-import { Suspense, useId, useState } from 'react';
+import { Suspense, useId, useRef, useState } from 'react';
 import type { ReactNode } from 'react';
-import { downloadCsv } from './csv';
+import { toCsv } from './csv';
 import type { CsvValue } from './csv';
 import { DataTable } from './data-table';
+import { saveFile } from './save-file';
+import { svgText } from './svg-text';
 
 interface ChartFrameProps {
   title: string;
@@ -24,6 +26,13 @@ const cellText = (value: CsvValue | undefined) => (value === null || value === u
 export function ChartFrame({ title, summary, table, fileName, height = '20rem', children }: ChartFrameProps) {
   const [asTable, setAsTable] = useState(false);
   const heading = useId();
+  const chart = useRef<HTMLDivElement>(null);
+  const saveCsv = () =>
+    saveFile(`${fileName}.csv`, 'text/csv;charset=utf-8', '\uFEFF' + toCsv([table.head, ...table.rows]));
+  const saveSvg = () => {
+    const drawing = chart.current?.querySelector('svg');
+    if (drawing) saveFile(`${fileName}.svg`, 'image/svg+xml', svgText(drawing));
+  };
   const keyed = table.rows.map((cells, i) => ({ key: String(i), cells }));
   const columns = table.head.map((head, i) => ({
     head,
@@ -41,13 +50,14 @@ export function ChartFrame({ title, summary, table, fileName, height = '20rem', 
           <Button size="sm" variant="outline" onClick={() => setAsTable(!asTable)}>
             {asTable ? 'As a chart' : 'As a table'}
           </Button>
-          <Button
-            size="sm"
-            variant="outline"
-            onClick={() => downloadCsv(`${fileName}.csv`, [table.head, ...table.rows])}
-          >
+          <Button size="sm" variant="outline" onClick={saveCsv}>
             Save as CSV
           </Button>
+          {!asTable && (
+            <Button size="sm" variant="outline" onClick={saveSvg}>
+              Save as SVG
+            </Button>
+          )}
         </Flex>
       </Flex>
       <Text as="figcaption" color="fg.muted" mt="1" mb="4">
@@ -56,7 +66,7 @@ export function ChartFrame({ title, summary, table, fileName, height = '20rem', 
       {asTable ? (
         <DataTable caption={title} columns={columns} rows={keyed} rowKey={({ key }) => key} />
       ) : (
-        <Box height={height} aria-hidden="true">
+        <Box ref={chart} height={height} aria-hidden="true">
           <Suspense fallback={<Skeleton height="full" />}>{children}</Suspense>
         </Box>
       )}
