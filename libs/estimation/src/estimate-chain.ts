@@ -1,20 +1,23 @@
 import { checkHistory } from './check-history';
-import { rideFactor } from './distance/equivalent-km';
-import { dueCdf, dueWindow } from './due/due-distribution';
+import { factorAhead } from './distance/factor-ahead';
 import { chainAlerts } from './due/alerts';
+import { dueCdf, dueWindow } from './due/due-distribution';
+import { atomsOf } from './due/km-left';
 import { whyMoved } from './due/reasons';
+import type { DueState } from './due/state';
 import { elongationCurve } from './elongation/curve';
 import { doubtedReadings } from './elongation/doubted';
 import { narrowing } from './elongation/narrowing';
-import { elongationPosterior, PlacedReading } from './elongation/posterior';
+import type { PlacedReading } from './elongation/model';
+import { elongationPosterior } from './elongation/posterior';
 import { lifeQuantile, riderLife } from './life/rider-life';
 import { currentTreatment, lifeObservations } from './life/treatments';
-import { weightedBand } from './math/weighted';
 import { forecastRiding } from './riding';
-import type { ChainEstimate, ChainHistory, Factor, Factors, FleetModel } from './types';
+import type { ChainEstimate, ChainHistory, FleetModel } from './types';
 import { chainUsage } from './usage';
 
-const LIFE_ATOMS = 24;
+/** A chain that hardly ever gets its turn still carries this share of the riding. */
+const LEAST_SHARE = 0.01;
 
 /** Everything the product says of one chain today. Pure: the same history and model give the same digits. */
 export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEstimate {
@@ -27,25 +30,45 @@ export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEs
   const treatment = currentTreatment(history);
   const life = riderLife(treatment.kind, lifeObservations(history, usage), fleet.life);
   const lubeKmUsed = usage.lubeKmBetween(treatment.since, today);
-  const lives = Array.from({ length: LIFE_ATOMS }, (_, i) => lifeQuantile(life, (i + 0.5) / LIFE_ATOMS));
-  const lubeLeft = { values: lives.map((l) => (l - lubeKmUsed) / perKm.lube), weights: lives.map(() => 1) };
+  const lubeLeft = atomsOf((p) => (lifeQuantile(life, p) - lubeKmUsed) / perKm.lube);
   const limitDays = history.calendarLimitDays[regime];
   const lubrication = history.fitted
     ? dueWindow(dueCdf(lubeLeft, forecast), today, limitDays === null ? null : treatment.since + limitDays)
     : null;
 
   const prior = fleet.elongation.rate[regime][bikeKind];
-  const readings: PlacedReading[] = history.readings.map((r) => ({ ...r, wearKm: usage.wearKmAt(r.day) }));
+  const readings = placed(history, usage.wearKmAt);
   const posterior = elongationPosterior(readings, prior);
-  const wearLeft = posterior.wearKmLeft(usage.wearKm, limitPct);
-  const kmLeft = wearLeft.values.map((km) => km / perKm.wear / Math.max(history.shareOfRiding, 0.01));
-  const replacement = dueWindow(dueCdf(condense(kmLeft, wearLeft.weights), forecast), today, null);
-
-  const wearKmLeft = weightedBand(
-    wearLeft.values.map((km) => Math.max(km, 0)),
-    wearLeft.weights,
+  const left = (p: number) => posterior.wearKmLeft(usage.wearKm, limitPct, p);
+  const kmPerWearKm = 1 / (perKm.wear * Math.max(history.shareOfRiding, LEAST_SHARE));
+  const replacement = dueWindow(
+    dueCdf(
+      atomsOf((p) => left(p) * kmPerWearKm),
+      forecast,
+    ),
+    today,
+    null,
   );
-  const state = { lubrication, replacement, forecast, perKm, usage, treatment };
+
+  const wearKmLeft = {
+    p10: Math.max(left(0.1), 0),
+    p50: Math.max(left(0.5), 0),
+    p90: Math.max(left(0.9), 0),
+  };
+  const doubted = doubtedReadings(readings, posterior);
+  const shareUsed = lubeKmUsed / lifeQuantile(life, 0.5);
+  const chancePast = posterior.chancePast(usage.wearKm, limitPct);
+  const state: DueState = {
+    lubrication,
+    replacement,
+    forecast,
+    perKm,
+    usage,
+    treatment,
+    shareUsed,
+    chancePast,
+    doubted,
+  };
   return {
     wearKm: usage.wearKm,
     totalKm: usage.totalKm,
@@ -55,7 +78,7 @@ export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEs
     treatment: {
       lubeKmUsed,
       life: { p10: lifeQuantile(life, 0.1), p50: lifeQuantile(life, 0.5), p90: lifeQuantile(life, 0.9) },
-      shareUsed: lubeKmUsed / lifeQuantile(life, 0.5),
+      shareUsed,
       since: treatment.since,
       kind: treatment.given,
     },
@@ -63,49 +86,20 @@ export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEs
       now: posterior.elongationAt(usage.wearKm),
       rate: posterior.rate,
       wearKmLeft,
-      chancePast: posterior.chancePast(usage.wearKm, limitPct),
+      chancePast,
       curve: elongationCurve(history, usage, posterior, wearKmLeft.p90, forecast, perKm.wear),
-      doubted: doubtedReadings(readings, posterior),
+      doubted,
     },
     kmPerWeek: forecast.kmPerWeek,
     reasons: whyMoved(history, fleet.factors, state),
-    alerts: chainAlerts(history, state, posterior, lubeKmUsed / lifeQuantile(life, 0.5)),
-    narrows: narrowing(readings, prior, posterior, usage.wearKm, limitPct),
+    alerts: chainAlerts(history, state),
+    narrows: narrowing(posterior, usage.wearKm, limitPct, ['three-point']),
   };
 }
 
-/** What a km ahead will count for: the last year's rides on this bike, steadied by 200 km of ordinary riding. */
-function factorAhead({ bikeRides, rides, today }: ChainHistory, factors: Factors): Factor {
-  const sums = { km: 200, lube: 200 * 1.15, wear: 200 * 1.15 };
-  for (const ride of bikeRides.length > 0 ? bikeRides : rides) {
-    if (ride.day > today || ride.day <= today - 365) continue;
-    const factor = rideFactor(ride, factors);
-    sums.km += ride.km;
-    sums.lube += ride.km * factor.lube;
-    sums.wear += ride.km * factor.wear;
-  }
-  return { lube: sums.lube / sums.km, wear: sums.wear / sums.km };
-}
-
-/** Many weighted atoms as 24 equally likely ones and the share that is due already, so that the forecast is asked less often. */
-function condense(values: readonly number[], weights: readonly number[]) {
-  const order = values.map((_, i) => i).sort((i, j) => values[i]! - values[j]!);
-  const total = weights.reduce((sum, w) => sum + w, 0);
-  const atoms: number[] = [];
-  const shares: number[] = [];
-  let group = 0;
-  let sum = 0;
-  for (const i of order) {
-    group += weights[i]! / total;
-    sum += (weights[i]! / total) * values[i]!;
-    if (group < 1 / LIFE_ATOMS) continue;
-    atoms.push(sum / group);
-    shares.push(group);
-    group = sum = 0;
-  }
-  if (group > 0) {
-    atoms.push(sum / group);
-    shares.push(group);
-  }
-  return { values: atoms, weights: shares };
+/** Readings taken by today, each with the chain's wear km then. */
+function placed({ readings, today }: ChainHistory, wearKmAt: (day: number) => number): PlacedReading[] {
+  return readings
+    .filter(({ day }) => day <= today)
+    .map((reading) => ({ ...reading, wearKm: reading.baseline ? 0 : wearKmAt(reading.day) }));
 }

@@ -1,43 +1,42 @@
 import { HORIZON_DAYS } from '../riding';
 import { Day, DueWindow, LEVELS, RidingForecast } from '../types';
+import type { KmLeft } from './km-left';
+import { reachTable } from './reach-table';
 
 const WEEKS = 26;
-
-/** Km still to ride until due, as weighted atoms; zero or less is due already. */
-export interface KmLeft {
-  values: readonly number[];
-  weights: readonly number[];
-}
 
 /** cdf[d] = chance of being due by d days from today, d = 0..horizon. */
 export function dueCdf(left: KmLeft, forecast: RidingForecast): Float64Array {
   const cdf = new Float64Array(HORIZON_DAYS + 1);
-  const total = left.weights.reduce((sum, w) => sum + w, 0);
-  left.values.forEach((km, i) => {
-    const weight = left.weights[i]! / total;
-    if (weight <= 0) return;
-    if (km <= 0) cdf[0]! += weight;
-    else spread(cdf, forecast.daysToReach(km), weight);
-  });
-  for (let d = 1; d < cdf.length; d++) cdf[d]! += cdf[d - 1]!;
+  const ahead = left.filter((km) => km > 0);
+  if (ahead.length > 0) {
+    const reach = reachTable(forecast, ahead[0]!, ahead[ahead.length - 1]!);
+    for (const km of ahead) spread(cdf, reach(km), 1 / left.length);
+  }
+  // `spread` left changes of the density: summed once they are the density, twice the distribution.
+  let density = 0;
+  let sum = (left.length - ahead.length) / left.length;
+  for (let d = 0; d < cdf.length; d++) {
+    density += cdf[d]!;
+    sum += density;
+    cdf[d] = Math.min(Math.max(sum, 0), 1);
+  }
   return cdf;
 }
 
-/** Adds `weight` over the days, even between neighbouring levels; what lies beyond the horizon falls off the end. */
-function spread(density: Float64Array, days: readonly number[], weight: number): void {
-  const first = days[0]!;
-  const last = days[days.length - 1]!;
-  const edges = [
-    Math.max(1, 1.3 * first - 0.3 * days[1]!),
-    ...days,
-    1.3 * last - 0.3 * days[days.length - 2]! + 1,
-  ];
-  const levels = [0, ...LEVELS, 1];
-  for (let i = 1; i < edges.length; i++) {
-    const share = (levels[i]! - levels[i - 1]!) * weight;
-    const from = Math.round(edges[i - 1]!);
-    const to = Math.max(Math.round(edges[i]!), from + 1);
-    for (let d = from; d < to && d < HORIZON_DAYS; d++) density[d]! += share / (to - from);
+const EDGES = [0, ...LEVELS, 1];
+
+/** Adds `weight` evenly over the days between neighbouring levels; what lies beyond the horizon falls off the end. */
+function spread(changes: Float64Array, days: readonly number[], weight: number): void {
+  const last = days.length - 1;
+  let from = Math.round(Math.max(1, 1.3 * days[0]! - 0.3 * days[1]!));
+  for (let i = 1; i < EDGES.length; i++) {
+    const edge = i <= last + 1 ? days[i - 1]! : 1.3 * days[last]! - 0.3 * days[last - 1]! + 1;
+    const to = Math.max(Math.round(edge), from + 1);
+    const daily = ((EDGES[i]! - EDGES[i - 1]!) * weight) / (to - from);
+    if (from < HORIZON_DAYS) changes[from]! += daily;
+    if (from < HORIZON_DAYS) changes[Math.min(to, HORIZON_DAYS)]! -= daily;
+    from = Math.max(Math.round(edge), 1);
   }
 }
 

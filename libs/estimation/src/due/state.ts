@@ -1,5 +1,5 @@
 import type { CurrentTreatment } from '../life/treatments';
-import type { DueWindow, Factor, RidingForecast } from '../types';
+import type { DueWindow, ElongationState, Factor, RidingForecast } from '../types';
 import type { Usage } from '../usage';
 
 /** What the reasons and alerts are read from. */
@@ -7,7 +7,13 @@ export interface DueState {
   lubrication: DueWindow | null;
   replacement: DueWindow;
   forecast: RidingForecast;
+  /** What a km ahead counts for. */
   perKm: Factor;
   usage: Usage;
   treatment: CurrentTreatment;
+  /** Lube km used / median life. */
+  shareUsed: number;
+  /** Chance that the wear limit is past. */
+  chancePast: number;
+  doubted: ElongationState['doubted'];
 }
