@@ -19,7 +19,6 @@ export function ChainGlance({ chain }: { chain: Chain }) {
   const due = dueWords[chain.regime];
   return (
     <Stack gap="5">
-      {estimate && <ChainAlerts alerts={estimate.alerts} regime={chain.regime} />}
       <Box>
         <Text mb="3">
           <Link asChild fontWeight="semibold">
@@ -42,6 +41,7 @@ export function ChainGlance({ chain }: { chain: Chain }) {
           <DueWindow {...state.lubrication} today={today} label={due} />
         </Box>
       )}
+      {estimate && <ChainAlerts alerts={estimate.alerts} regime={chain.regime} />}
       <WearLine chain={chain} />
     </Stack>
   );

@@ -1,4 +1,5 @@
 import { Tabs } from '@chakra-ui/react';
+import type { SystemStyleObject } from '@chakra-ui/react';
 import type { ChainEstimate } from '@halfpitch/contracts';
 import { Panel } from '../../components/panel';
 import { ReadingTable } from '../readings/reading-table';
@@ -13,6 +14,16 @@ interface ChainHistoryProps {
   doubted: ChainEstimate['elongation']['doubted'];
 }
 
+const trigger: SystemStyleObject = {
+  minHeight: '11',
+  px: 2,
+  justifyContent: 'center',
+  borderBottomWidth: '3px',
+  borderColor: 'transparent',
+  _before: { display: 'none' },
+  _selected: { color: 'steel.fg', fontWeight: 'semibold', borderColor: 'steel.solid' },
+};
+
 /** Everything that happened to the chain, and what was made of it. */
 export function ChainHistory({ chainId, doubted }: ChainHistoryProps) {
   const parts = [
@@ -25,9 +36,13 @@ export function ChainHistory({ chainId, doubted }: ChainHistoryProps) {
   return (
     <Panel title="History">
       <Tabs.Root defaultValue="readings" lazyMount>
-        <Tabs.List flexWrap="wrap">
+        <Tabs.List
+          display="grid"
+          gridTemplateColumns="repeat(auto-fit, minmax(5.75rem, 1fr))"
+          borderBottomWidth="1px"
+        >
           {parts.map(({ value, label }) => (
-            <Tabs.Trigger key={value} value={value} minHeight="11" px="3">
+            <Tabs.Trigger key={value} value={value} css={trigger}>
               {label}
             </Tabs.Trigger>
           ))}

@@ -1,6 +1,6 @@
 import type { Reading } from '@halfpitch/contracts';
 import { describe, expect, it } from 'vitest';
-import { cyclePoints, elongationPoints, intervals, splitCycles, timeOf } from './chart-data';
+import { cyclePoints, elongationPoints, intervals, monthMarks, splitCycles, timeOf } from './chart-data';
 
 const reading = (over: Partial<Reading>): Reading => ({
   id: 'r',
@@ -24,6 +24,20 @@ describe('elongationPoints', () => {
       { time: timeOf('2026-02-01'), band: [0, 0.2], middle: 0.1 },
       { time: timeOf('2026-03-01'), measured: 0.31 },
     ]);
+  });
+});
+
+describe('monthMarks', () => {
+  it('marks firsts of months evenly, never more than there is room for', () => {
+    const marks = monthMarks(timeOf('2024-12-15'), timeOf('2028-12-01'));
+    expect(marks.map((time) => new Date(time).toISOString().slice(0, 10))).toEqual([
+      '2025-01-01',
+      '2025-11-01',
+      '2026-09-01',
+      '2027-07-01',
+      '2028-05-01',
+    ]);
+    expect(monthMarks(timeOf('2026-03-02'), timeOf('2026-03-30'))).toEqual([]);
   });
 });
 

@@ -29,6 +29,20 @@ export function elongationPoints(
   return [...predicted, ...measured].sort((a, b) => a.time - b.time);
 }
 
+const MONTHS_MARKED = 5;
+
+/** Firsts of months to mark on a time line, about as many as there is room for. */
+export function monthMarks(from: number, to: number): number[] {
+  const [first, last] = [new Date(from), new Date(to)];
+  const months =
+    (last.getUTCFullYear() - first.getUTCFullYear()) * 12 + last.getUTCMonth() - first.getUTCMonth();
+  const every = Math.max(1, Math.ceil(months / MONTHS_MARKED));
+  const marks: number[] = [];
+  for (let i = 1; i <= months; i += every)
+    marks.push(Date.UTC(first.getUTCFullYear(), first.getUTCMonth() + i, 1));
+  return marks;
+}
+
 /** A go/no-go reading is an interval: from what goes in to what does not, %. */
 export function intervals(readings: readonly Reading[], top: number) {
   return readings

@@ -10,6 +10,7 @@ import {
   YAxis,
 } from 'recharts';
 import { chartColours, chartText } from '../../components/chart-colours';
+import { monthMarks } from './chart-data';
 import type { ElongationPoint, intervals } from './chart-data';
 
 interface ElongationDrawingProps {
@@ -38,7 +39,8 @@ export default function ElongationDrawing({ points, strokes, limit, top, today }
           tickFormatter={(time: number) => month.format(time)}
           tick={chartText}
           stroke={chartColours.axis}
-          minTickGap={40}
+          ticks={monthMarks(points[0]?.time ?? today, points.at(-1)?.time ?? today)}
+          minTickGap={24}
         />
         <YAxis
           domain={[0, top]}

@@ -12,13 +12,13 @@ export function StepFields() {
         name="goes"
         label="The largest step that goes in"
         options={[{ value: '', label: 'None' }, ...options]}
-        minTileWidth="4.75rem"
+        minTileWidth="3.75rem"
       />
       <ChoiceTiles
         name="stops"
         label="The smallest step that does not"
         options={[...options, { value: '', label: 'All go in' }]}
-        minTileWidth="4.75rem"
+        minTileWidth="3.75rem"
       />
     </>
   );

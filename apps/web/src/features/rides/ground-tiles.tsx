@@ -43,7 +43,7 @@ export function GroundTiles() {
   return (
     <>
       <ChoiceTiles name="surface" label="Ground" options={surfaces} minTileWidth="4.75rem" />
-      {!indoors && <ChoiceTiles name="weather" label="Weather" options={weathers} minTileWidth="4.75rem" />}
+      {!indoors && <ChoiceTiles name="weather" label="Weather" options={weathers} minTileWidth="3.75rem" />}
     </>
   );
 }

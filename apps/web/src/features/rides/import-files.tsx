@@ -1,4 +1,4 @@
-import { Button, Stack, Text } from '@chakra-ui/react';
+import { Button, Checkbox, Stack, Text } from '@chakra-ui/react';
 import { MAX_IMPORT_BYTES } from '@halfpitch/contracts';
 import type { Bike, Surface, Weather } from '@halfpitch/contracts';
 import { useQuery } from '@tanstack/react-query';
@@ -26,6 +26,7 @@ function Importer({ bikes, first }: { bikes: Bike[]; first: Bike }) {
   const [ground, setGround] = useState<Surface | null>(null);
   const surface = ground ?? usualSurface(bike, []);
   const [weather, setWeather] = useState<Weather>('unknown');
+  const [anySport, setAnySport] = useState(false);
   const { uploads, add, retry } = useUploads();
   return (
     <Stack gap="6">
@@ -45,6 +46,7 @@ function Importer({ bikes, first }: { bikes: Bike[]; first: Bike }) {
         options={optionsOf(surfaceWords)}
         value={surface}
         onChange={setGround}
+        minTileWidth="4.75rem"
       />
       <Tiles
         name="weather"
@@ -52,13 +54,25 @@ function Importer({ bikes, first }: { bikes: Bike[]; first: Bike }) {
         options={optionsOf(weatherWords)}
         value={weather}
         onChange={setWeather}
+        minTileWidth="3.75rem"
       />
+      <Checkbox.Root
+        checked={anySport}
+        onCheckedChange={({ checked }) => setAnySport(checked === true)}
+        minHeight="11"
+      >
+        <Checkbox.HiddenInput />
+        <Checkbox.Control borderColor="border.control" />
+        <Checkbox.Label>Count recordings that name another sport, or none, as rides too</Checkbox.Label>
+      </Checkbox.Root>
       <FileDrop
         label="Drop ride files here, or choose them"
         help={`GPX, TCX, FIT and CSV, also packed as .zip or .gz; each up to ${MEGABYTES} MB`}
         accept=".gpx,.tcx,.fit,.csv,.zip,.gz"
         multiple
-        onFiles={(files) => add(files, { bikeId, surface, weather })}
+        onFiles={(files) =>
+          add(files, { bikeId, surface, weather, otherSports: anySport ? 'take' : 'leave' })
+        }
       />
       <ImportList uploads={uploads} onRetry={retry} />
     </Stack>

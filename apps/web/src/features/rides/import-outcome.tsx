@@ -6,13 +6,14 @@ import { importWords } from './import-words';
 export function ImportOutcome({ found }: { found: RideImport }) {
   const { state, message, problems } = found;
   const failed = state === 'failed';
+  const others = problems.filter((problem) => problem.message !== message);
   return (
     <>
       <Text color={failed ? 'fg.error' : undefined}>{failed && message ? message : importWords(found)}</Text>
       {!failed && message && message !== importWords(found) && <Text color="fg.muted">{message}</Text>}
-      {problems.length > 0 && (
+      {others.length > 0 && (
         <List.Root listStyle="none" mt="2" gap="1" color="fg.muted" textStyle="sm">
-          {problems.map(({ line, message: why }, i) => (
+          {others.map(({ line, message: why }, i) => (
             <List.Item key={i}>
               {line !== null && `Line ${line}: `}
               {why}

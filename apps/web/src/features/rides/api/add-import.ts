@@ -7,6 +7,8 @@ export interface ImportChoice {
   /** For what the file does not say. */
   surface: Surface;
   weather: Weather;
+  /** 'take': recordings of another sport, or of none that is named, count as rides too. */
+  otherSports: 'leave' | 'take';
 }
 
 /** Sends a file; the server reads it afterwards. */
