@@ -15,7 +15,7 @@ interface WeekTableProps {
 const banded = (head: string, of: (week: Week) => Band): Column<Week> => ({
   head,
   numeric: true,
-  cell: (week) => bandWords(of(week)),
+  cell: (week) => <Text whiteSpace="nowrap">{bandWords(of(week))}</Text>,
 });
 
 /** The weeks in figures; a week pressed shows who makes it up. */
@@ -41,7 +41,7 @@ export function WeekTable({ load, chosen, onChoose }: WeekTableProps) {
     banded('Pot loads', (week) => week.potLoads),
     banded('Bench minutes', (week) => week.benchMinutes),
     {
-      head: 'Against the bench',
+      head: 'Bench',
       cell: ({ benchMinutes }) => {
         const word = fit(benchMinutes, load.minutesPerWeek);
         return <Text fontWeight={word === 'fits' ? undefined : 'semibold'}>{fitWords[word]}</Text>;

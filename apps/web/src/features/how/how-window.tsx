@@ -1,0 +1,29 @@
+import { Text } from '@chakra-ui/react';
+import type { WorkshopSettings } from '@halfpitch/contracts';
+import { percent } from '../../app/format';
+import { useFormat } from '../../app/use-format';
+import { DueWindow } from '../../components/drawings/due-window';
+import { Panel } from '../../components/panel';
+
+const isoIn = (today: string, days: number) =>
+  new Date(Date.parse(`${today}T00:00:00Z`) + days * 86_400_000).toISOString().slice(0, 10);
+
+/** What a window says, and when it makes a letter. */
+export function HowWindow({ policy }: { policy: WorkshopSettings['reminderPolicy'] }) {
+  const { today } = useFormat();
+  const example = { p10: isoIn(today, 6), p50: isoIn(today, 13), p90: isoIn(today, 24) };
+  return (
+    <Panel title="4. A window, not just a date">
+      <Text mb="4">
+        Nobody knows the rides to come. We take many likely continuations of the rider’s own log, with its
+        seasons and pauses and what is planned, and see when each would use the treatment up. In eight of ten
+        the chain falls due inside the window; the darkest place is the most likely day. For example:
+      </Text>
+      <DueWindow {...example} today={today} label="An example" />
+      <Text mt="4">
+        A letter is written when the chance of falling due within {policy.days} days reaches{' '}
+        {percent(policy.chance)}, once for each treatment.
+      </Text>
+    </Panel>
+  );
+}

@@ -1,0 +1,5 @@
+import type { RouteObject } from 'react-router-dom';
+
+export const routes: RouteObject[] = [
+  { path: 'how', lazy: async () => ({ Component: (await import('./how')).How }) },
+];

@@ -1,0 +1,62 @@
+import { Grid, Heading, Stack, Text } from '@chakra-ui/react';
+import { surfaces } from '@halfpitch/contracts';
+import { Fragment } from 'react';
+import { NumberField } from '../../components/fields/number-field';
+import { Panel } from '../../components/panel';
+import { surfaceWords, weatherWords } from '../../components/trade-words';
+
+const weathers = ['dry', 'damp', 'wet', 'mud'] as const;
+
+interface Row {
+  path: string;
+  word: string;
+}
+
+function FactorRows({ title, rows }: { title: string; rows: Row[] }) {
+  return (
+    <div>
+      <Heading as="h3" size="md" mb="3">
+        {title}
+      </Heading>
+      <Grid
+        templateColumns={{ base: '1fr 1fr', md: '7rem 10rem 10rem' }}
+        columnGap="5"
+        rowGap="4"
+        alignItems="end"
+      >
+        {rows.map(({ path, word }) => (
+          <Fragment key={path}>
+            <Text gridColumn={{ base: '1 / -1', md: 'auto' }} fontWeight="semibold" pb={{ md: '2.5' }}>
+              {word}
+            </Text>
+            <NumberField name={`${path}.lube`} label="Treatment" unit="×" />
+            <NumberField name={`${path}.wear`} label="Wear" unit="×" />
+          </Fragment>
+        ))}
+      </Grid>
+    </div>
+  );
+}
+
+/** How much a kilometre counts for, by surface and weather. */
+export function FactorSettings() {
+  return (
+    <Panel title="What a kilometre counts for">
+      <Text color="fg.muted" mb="5" maxWidth="42rem">
+        A kilometre on a dry, clean road counts once. Surface and weather multiply: gravel 1.5 × wet 2 makes
+        3. The first figure is for how fast wax or oil is used up, the second for how fast the chain
+        lengthens.
+      </Text>
+      <Stack gap="7">
+        <FactorRows
+          title="Surface"
+          rows={surfaces.map((one) => ({ path: `factors.surface.${one}`, word: surfaceWords[one] }))}
+        />
+        <FactorRows
+          title="Weather"
+          rows={weathers.map((one) => ({ path: `factors.weather.${one}`, word: weatherWords[one] }))}
+        />
+      </Stack>
+    </Panel>
+  );
+}
