@@ -1,7 +1,6 @@
 import { Navigate, useLocation } from 'react-router-dom';
 import { ErrorState } from '../../components/error-state';
 import { PageLoading } from '../../components/loading-state';
-import { MotionArea } from '../../components/motion-area';
 import { SessionContext, useSessionQuery } from '../session';
 import { MoreParts } from '../theme/more-provider';
 import { homeOf } from './nav-items';
@@ -21,9 +20,7 @@ export function Component() {
   return (
     <SessionContext value={session}>
       <MoreParts>
-        <MotionArea>
-          <Shell />
-        </MotionArea>
+        <Shell />
       </MoreParts>
     </SessionContext>
   );

@@ -1,1 +1,0 @@
-export { domAnimation as default } from 'framer-motion';
