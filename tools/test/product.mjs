@@ -1,3 +1,4 @@
+import { mkdir } from 'node:fs/promises';
 import { join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { freePorts } from '../process/ports.mjs';
@@ -21,6 +22,7 @@ export async function startProduct({ dir = join(root, '.test', 'product'), ports
   const out = dist ?? process.env.TEST_DIST ?? join(root, 'dist');
   const life = new Lifetime();
   try {
+    await mkdir(dir, { recursive: true });
     await prepareBuild(root, { out, log: join(dir, 'build.log') });
     const options = { root, dist: out, dir, ports: ports ?? (await anyPorts()), life, stage: silently };
     const product = await runProduct({ ...options, throwAway: true, testHooks: true });
