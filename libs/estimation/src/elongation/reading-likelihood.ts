@@ -1,33 +1,47 @@
 import { normalCdf, normalPdf } from '../math/normal';
 import type { Reading } from '../types';
-import { methodErrors } from './methods';
+import { MethodError } from './methods';
 
-/** Share of readings that are simply wrong (a tool that slipped, a line mixed up), and how widely those scatter, %. */
+/** Share of readings that are simply wrong: a tool that slipped, a line mixed up. Our judgement. */
 export const WRONG_SHARE = 0.03;
-const WRONG_SD = 0.3;
+/** A wrong number is equally likely to show anything over a span of 1.5 %; a wrong go/no-go is a coin's toss. */
+const WRONG_DENSITY = 1 / 1.5;
+const WRONG_ANSWER = 0.5;
 
-/** Density of the largest of n equal places with normal noise, at z standard deviations above the truth. */
+/** The chances that make up a robust likelihood, at one true value. */
+export interface Chances {
+  /** (1 - share) times the likelihood of a sound reading. */
+  sound: number;
+  /** share times the likelihood of a wrong one: the same whatever the chain's length. */
+  wrong: number;
+}
+
+/**
+ * Density of the largest of n places measured, each with the same truth and independent normal noise, at z standard
+ * deviations above the truth: n φ(z) Φ(z)^(n-1). The worst place rules, so its noise is that of a maximum.
+ */
 function worstOf(n: number, z: number): number {
   return n === 1 ? normalPdf(z) : n * normalPdf(z) * normalCdf(z) ** (n - 1);
 }
 
-/** Likelihood of a reading, given what the gauge would show without noise (true elongation + offset, %). */
-export function soundLikelihood(reading: Reading, shown: number): number {
-  const { noiseSd } = methodErrors[reading.method];
-  if (reading.values)
-    return worstOf(reading.values.length, (Math.max(...reading.values) - shown) / noiseSd) / noiseSd;
+/** The reading's number, %: that of its worst place; undefined for a go/no-go answer. */
+export function worstPlace({ values }: Reading): number | undefined {
+  return values && values.length > 0 ? values.reduce((most, value) => Math.max(most, value)) : undefined;
+}
+
+/** Chances of a reading, given `shown` %: what its gauge would show without noise, true elongation plus offset. */
+export function readingChances(
+  reading: Reading,
+  shown: number,
+  { noiseSd }: MethodError,
+  wrongShare: number,
+): Chances {
+  const worst = worstPlace(reading);
+  if (worst !== undefined) {
+    const density = worstOf(reading.values!.length, (worst - shown) / noiseSd) / noiseSd;
+    return { sound: (1 - wrongShare) * density, wrong: wrongShare * WRONG_DENSITY };
+  }
   const below = reading.upper === undefined ? 1 : normalCdf((reading.upper - shown) / noiseSd);
-  const notYet = reading.lower === undefined ? 0 : normalCdf((reading.lower - shown) / noiseSd);
-  return Math.max(below - notYet, 0);
-}
-
-/** Likelihood of a reading that is wrong: it says next to nothing about the chain. */
-export function wrongLikelihood(reading: Reading, shown: number): number {
-  if (!reading.values) return 0.5;
-  return normalPdf((Math.max(...reading.values) - shown) / WRONG_SD) / WRONG_SD;
-}
-
-/** Robust likelihood: sound with a small chance of being wrong. */
-export function readingLikelihood(reading: Reading, shown: number): number {
-  return (1 - WRONG_SHARE) * soundLikelihood(reading, shown) + WRONG_SHARE * wrongLikelihood(reading, shown);
+  const under = reading.lower === undefined ? 0 : normalCdf((reading.lower - shown) / noiseSd);
+  return { sound: (1 - wrongShare) * Math.max(below - under, 0), wrong: wrongShare * WRONG_ANSWER };
 }
