@@ -1,14 +1,13 @@
 import { Band, Day, LEVELS, PlannedRiding, RidingForecast, RidingModel } from '../types';
 import { dailyLog, DailyLog } from './daily-log';
 import { defaultRidingModel } from './default-model';
-import { logFeatures } from './features';
-import { HORIZON_DAYS, LearnedRiding, TAUGHT_KM, taughtHorizon } from './model';
+import { HORIZON_DAYS, LearnedRiding, TAUGHT_KM } from './model';
 import { isQuiet } from './quiet';
 import { quantilesAt } from './quantiles';
-import { reachFeatures, simplePaths } from './reach';
+import { logView } from './view';
 
 /** Distances at which the quantiles are worked out; others are read between them on a log-log scale. */
-const NODES_KM = [10, 25, 50, 100, 150, 220, 300, 450, 600, 800, 1000, 1500, 2200, 3000] as const;
+const NODES_KM = [10, 50, 150, 300, 600, 1000, 1500, 2200, 3000] as const;
 const LAST_TAUGHT = TAUGHT_KM[TAUGHT_KM.length - 1]!;
 const FIRST_TAUGHT = TAUGHT_KM[0];
 /** A quiet log says less of what comes: its windows are this much wider, on the log scale. */
@@ -39,12 +38,8 @@ const isLearned = (model: RidingModel): model is LearnedRiding =>
 /** Quantiles at each node: rows by node, made to rise with the distance. */
 function quantileTable(log: DailyLog, model: LearnedRiding): number[][] {
   const o = log.km.length;
-  const paths = simplePaths(log, o, model.season, HORIZON_DAYS);
-  const base = o > 0 ? logFeatures(log, o) : model.mean.slice(0, model.mean.length - paths.length);
-  const at = (km: number) => {
-    const reach = o > 0 ? reachFeatures(paths, km, taughtHorizon(km)) : model.mean.slice(base.length);
-    return quantilesAt(model, [...base, ...reach], km);
-  };
+  const view = o > 0 ? logView(log, o, model.season) : () => model.mean;
+  const at = (km: number) => quantilesAt(model, view(km), km);
   const first = at(FIRST_TAUGHT);
   const last = at(LAST_TAUGHT);
   const rows = NODES_KM.map((km) => {

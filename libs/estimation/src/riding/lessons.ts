@@ -1,8 +1,8 @@
 import type { Day } from '../types';
 import { DailyLog, dailyLog } from './daily-log';
-import { logFeatures } from './features';
 import { TAUGHT_KM, taughtHorizon } from './model';
-import { firstReaching, reachFeatures, simplePaths } from './reach';
+import { firstReaching } from './reach';
+import { logView } from './view';
 
 export interface RiderLog {
   rider: string;
@@ -18,8 +18,6 @@ export interface Outcome {
   horizon: number;
 }
 
-const MOST_DAYS = 731;
-
 /** Every outcome that the logs show, at origins every `step` days from three weeks on. */
 export function outcomesOf(logs: readonly DailyLog[], season: readonly number[], step: number): Outcome[] {
   return logs.flatMap((log, rider) => {
@@ -27,8 +25,7 @@ export function outcomesOf(logs: readonly DailyLog[], season: readonly number[],
     for (let o = 21; o < log.km.length - 1; o += step) {
       if (log.rideDays[o]! < 4 || log.rideDays[o] === log.rideDays[Math.max(o - 60, 0)]) continue;
       const ahead = log.sums.subarray(o + 1).map((sum) => sum - log.sums[o]!);
-      const paths = simplePaths(log, o, season, MOST_DAYS);
-      const base = logFeatures(log, o);
+      const view = logView(log, o, season);
       for (const km of TAUGHT_KM) {
         const horizon = taughtHorizon(km);
         const reached = firstReaching(ahead, km - 1e-9);
@@ -36,7 +33,7 @@ export function outcomesOf(logs: readonly DailyLog[], season: readonly number[],
         const days = Math.min(reached + 1, horizon);
         outcomes.push({
           rider,
-          features: [...base, ...reachFeatures(paths, km, horizon)],
+          features: view(km),
           km,
           days,
           horizon,
