@@ -36,6 +36,9 @@ describe('reasonWords', () => {
     expect(reasonWords({ code: 'reading', about: 'replacement', days: 12, data: { readings: 1 } })).toBe(
       'One new chain-checker reading moved it 12 days later.',
     );
+    expect(reasonWords({ code: 'wet-rides', about, days: -6, data: { rides: 2, km: 74 } }, 'mi')).toBe(
+      'Two wet rides (46 mi, which count for more) moved it six days earlier.',
+    );
     expect(reasonWords({ code: 'first-estimate', about, days: 0, data: {} })).toMatch(/first estimate/);
   });
 });

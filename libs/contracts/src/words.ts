@@ -1,3 +1,4 @@
+import type { DistanceUnit } from './accounts';
 import type { DueWindow, Reason } from './estimates';
 
 const part = (day: string, options: Intl.DateTimeFormatOptions) =>
@@ -32,7 +33,14 @@ export function windowWords(
 
 const NUMBERS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten'];
 const count = (n = 1, one: string, many: string) => `${NUMBERS[n] ?? n} ${n === 1 ? one : many}`;
-const km = (n: number | undefined) => `${Math.round(n ?? 0)} km`;
+/** Kilometres as this reader counts them. */
+type Far = (km: number | undefined) => string;
+/** The statute mile: 1.609344 km exactly (international yard and pound agreement, 1959; memory). */
+const KM_IN = { km: 1, mi: 1.609344 } as const;
+const farIn =
+  (unit: DistanceUnit): Far =>
+  (km = 0) =>
+    `${Math.round(km / KM_IN[unit])} ${unit}`;
 
 const SENTENCES = {
   'first-estimate': 'This is the first estimate, from what is known so far.',
@@ -44,26 +52,28 @@ const SENTENCES = {
 type Cause = Exclude<Reason['code'], keyof typeof SENTENCES>;
 
 /** What happened, without what it did to the window. */
-const CAUSES: Record<Cause, (data: Reason['data']) => string> = {
-  'riding-more': (data) => `More riding than usual (${km(data.km)} instead of about ${km(data.usual)})`,
-  'riding-less': (data) => `Less riding than usual (${km(data.km)} instead of about ${km(data.usual)})`,
-  'wet-rides': (data) =>
-    `${count(data.rides, 'wet ride', 'wet rides')} (${km(data.km)}, which count for more)`,
-  'rough-rides': (data) =>
-    `${count(data.rides, 'ride', 'rides')} off the road (${km(data.km)}, which count for more)`,
+const CAUSES: Record<Cause, (data: Reason['data'], far: Far) => string> = {
+  'riding-more': (data, far) =>
+    `More riding than usual (${far(data.km)} instead of about ${far(data.usual)})`,
+  'riding-less': (data, far) =>
+    `Less riding than usual (${far(data.km)} instead of about ${far(data.usual)})`,
+  'wet-rides': (data, far) =>
+    `${count(data.rides, 'wet ride', 'wet rides')} (${far(data.km)}, which count for more)`,
+  'rough-rides': (data, far) =>
+    `${count(data.rides, 'ride', 'rides')} off the road (${far(data.km)}, which count for more)`,
   reading: (data) => count(data.readings, 'new chain-checker reading', 'new chain-checker readings'),
   treatment: () => 'The treatment that was given',
-  'planned-riding': (data) => `${km(data.km)} of planned riding`,
-  'unlogged-distance': (data) => `${km(data.km)} on the odometer that nobody logged`,
+  'planned-riding': (data, far) => `${far(data.km)} of planned riding`,
+  'unlogged-distance': (data, far) => `${far(data.km)} on the odometer that nobody logged`,
 };
 
 const isWhole = (code: Reason['code']): code is keyof typeof SENTENCES => code in SENTENCES;
 const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** One reason as a sentence: 'Two wet rides (74 km, which count for more) moved it six days earlier.' */
-export function reasonWords({ code, days, data }: Reason): string {
+export function reasonWords({ code, days, data }: Reason, unit: DistanceUnit = 'km'): string {
   if (isWhole(code)) return SENTENCES[code];
-  const cause = capital(CAUSES[code](data));
+  const cause = capital(CAUSES[code](data, farIn(unit)));
   const size = Math.abs(Math.round(days));
   if (size === 0) return `${cause} did not move it.`;
   return `${cause} moved it ${count(size, 'day', 'days')} ${days < 0 ? 'earlier' : 'later'}.`;

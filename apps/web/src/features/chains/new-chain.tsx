@@ -1,41 +1,45 @@
 import { newChain } from '@halfpitch/contracts';
 import type { Bike, Chain } from '@halfpitch/contracts';
 import { useQuery } from '@tanstack/react-query';
-import { useState } from 'react';
-import { useNavigate, useSearchParams } from 'react-router-dom';
+import { useNavigate } from 'react-router-dom';
 import { useSession } from '../../app/session';
-import { Tiles } from '../../components/fields/tiles';
+import { EmptyState } from '../../components/empty-state';
 import { Form } from '../../components/form';
 import { Loaded } from '../../components/loaded';
 import { PageHeader } from '../../components/page-header';
 import { SubmitButton } from '../../components/submit-button';
 import { toastDone } from '../../components/toaster';
-import { bikesQuery } from '../bikes/api/bikes';
+import { useWhoseBikes } from '../bikes/use-whose-bikes';
 import { addChain } from './api/add-chain';
 import { allChainsQuery } from './api/chains';
 import { ChainFields } from './chain-fields';
 import { useChanged } from './follow-estimate';
 import { nextLabel } from './next-label';
+import { PlaceTiles } from './place-tiles';
 
-const BOX = 'box';
+/** The bike that is named, or the only one. */
+const firstOf = (bikes: readonly Bike[], wanted: string | null) =>
+  bikes.find(({ id }) => id === wanted) ?? (bikes.length === 1 ? bikes[0] : undefined);
 
-function ChainForm({ bikes, chains, first }: { bikes: Bike[]; chains: Chain[]; first: Bike | undefined }) {
-  const { workshop, riderId } = useSession();
-  const [search] = useSearchParams();
-  const [place, setPlace] = useState(first?.id ?? BOX);
+interface ChainFormProps {
+  riderId: string | undefined;
+  bikes: Bike[];
+  /** Those there are, for the next label and the lubricant. */
+  chains: Chain[];
+  /** The bike it goes on. */
+  first: Bike | undefined;
+}
+
+function ChainForm({ riderId, bikes, chains, first }: ChainFormProps) {
+  const { workshop } = useSession();
   const navigate = useNavigate();
   const changed = useChanged();
-  const owner = riderId ?? first?.riderId ?? search.get('rider') ?? undefined;
-  const places = [
-    ...bikes.map(({ id, name }) => ({ value: id, label: name })),
-    { value: BOX, label: 'In the box' },
-  ];
   return (
     <Form
       schema={newChain}
       defaultValues={{
-        riderId: owner,
-        bikeId: null,
+        riderId,
+        bikeId: first?.id ?? null,
         label: nextLabel(chains),
         speeds: first?.speeds ?? 11,
         regime: chains[0]?.regime ?? 'immersion-wax',
@@ -43,20 +47,13 @@ function ChainForm({ bikes, chains, first }: { bikes: Bike[]; chains: Chain[]; f
         inServiceOn: workshop.today,
       }}
       onSubmit={async (values) => {
-        const chain = await addChain({ ...values, bikeId: place === BOX ? null : place });
+        const chain = await addChain(values);
         changed(chain.id);
         toastDone(`${chain.label} is added.`);
         await navigate(`/chains/${chain.id}`, { replace: true });
       }}
     >
-      <Tiles
-        name="place"
-        label="Where it is"
-        options={places}
-        value={place}
-        onChange={setPlace}
-        minTileWidth="8rem"
-      />
+      <PlaceTiles bikes={bikes} />
       <ChainFields />
       <SubmitButton alignSelf="flex-start">Add the chain</SubmitButton>
     </Form>
@@ -65,13 +62,12 @@ function ChainForm({ bikes, chains, first }: { bikes: Bike[]; chains: Chain[]; f
 
 /** A new chain, on the bike named in the address or in the box. */
 export function NewChain() {
-  const { riderId } = useSession();
-  const [search] = useSearchParams();
-  const of = riderId ?? search.get('rider') ?? undefined;
-  const bikes = useQuery(bikesQuery({ riderId: of }));
-  const first = bikes.data?.items.find(({ id }) => id === search.get('bike'));
-  const owner = of ?? first?.riderId;
-  const chains = useQuery(allChainsQuery({ riderId: owner }));
+  const { bikeId, riderId, bikes, isNamed } = useWhoseBikes();
+  const chains = useQuery({ ...allChainsQuery({ riderId }), enabled: riderId !== undefined });
+  if (!isNamed)
+    return (
+      <EmptyState title="Whose chain is it?">Open the rider first and add the chain from there.</EmptyState>
+    );
   return (
     <>
       <PageHeader title="Add a chain" lead="A chain that is on the bike now goes into the box." />
@@ -79,11 +75,7 @@ export function NewChain() {
         {({ items }) => (
           <Loaded query={chains}>
             {(page) => (
-              <ChainForm
-                bikes={items.filter((bike) => bike.riderId === owner)}
-                chains={page.items}
-                first={first}
-              />
+              <ChainForm riderId={riderId} bikes={items} chains={page.items} first={firstOf(items, bikeId)} />
             )}
           </Loaded>
         )}

@@ -1,6 +1,7 @@
 import { Box, List, SimpleGrid, Text } from '@chakra-ui/react';
 import type { DueWindow, Reason } from '@halfpitch/contracts';
 import { reasonWords } from '../../app/format';
+import { useFormat } from '../../app/use-format';
 import { chanceWords } from './estimate-words';
 
 /** How sure it is: the chance that it is due by then. */
@@ -28,6 +29,7 @@ export function Chances({ window }: { window: DueWindow }) {
 
 /** Why the window lies there, and what moved it since a week ago. */
 export function Reasons({ reasons }: { reasons: readonly Reason[] }) {
+  const { unit } = useFormat();
   if (reasons.length === 0) return null;
   return (
     <Box>
@@ -36,7 +38,7 @@ export function Reasons({ reasons }: { reasons: readonly Reason[] }) {
       </Text>
       <List.Root ps="5" gap="1">
         {reasons.map((reason) => (
-          <List.Item key={reason.code}>{reasonWords(reason)}</List.Item>
+          <List.Item key={reason.code}>{reasonWords(reason, unit)}</List.Item>
         ))}
       </List.Root>
     </Box>

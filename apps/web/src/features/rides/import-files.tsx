@@ -1,18 +1,15 @@
 import { Button, Checkbox, Stack, Text } from '@chakra-ui/react';
 import { MAX_IMPORT_BYTES } from '@halfpitch/contracts';
 import type { Bike, Surface, Weather } from '@halfpitch/contracts';
-import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { Link, useSearchParams } from 'react-router-dom';
-import { useSession } from '../../app/session';
+import { Link } from 'react-router-dom';
 import { EmptyState } from '../../components/empty-state';
 import { Tiles } from '../../components/fields/tiles';
 import { FileDrop } from '../../components/file-drop';
 import { Loaded } from '../../components/loaded';
 import { PageHeader } from '../../components/page-header';
 import { surfaceWords, weatherWords } from '../../components/trade-words';
-import { bikeQuery } from '../bikes/api/bike';
-import { bikesQuery } from '../bikes/api/bikes';
+import { useWhoseBikes } from '../bikes/use-whose-bikes';
 import { optionsOf } from '../chains/options';
 import { ImportList } from './import-list';
 import { useUploads } from './use-uploads';
@@ -81,14 +78,8 @@ function Importer({ bikes, first }: { bikes: Bike[]; first: Bike }) {
 
 /** Many rides at once, from files. */
 export function ImportFiles() {
-  const { riderId } = useSession();
-  const [search] = useSearchParams();
-  const wanted = search.get('bike');
-  const named = useQuery({ ...bikeQuery(wanted ?? ''), enabled: riderId === null && wanted !== null });
-  const of = riderId ?? named.data?.riderId;
-  const bikes = useQuery({ ...bikesQuery({ riderId: of }), enabled: of !== undefined });
-  if (riderId === null && wanted === null)
-    return <EmptyState title="Whose rides are they?">Open the rider’s bike first.</EmptyState>;
+  const { bikeId, bikes, isNamed } = useWhoseBikes();
+  if (!isNamed) return <EmptyState title="Whose rides are they?">Open the rider’s bike first.</EmptyState>;
   return (
     <>
       <PageHeader
@@ -97,7 +88,7 @@ export function ImportFiles() {
       />
       <Loaded query={bikes}>
         {({ items }) => {
-          const first = items.find(({ id }) => id === wanted) ?? items[0];
+          const first = items.find(({ id }) => id === bikeId) ?? items[0];
           if (first) return <Importer bikes={items} first={first} />;
           return (
             <EmptyState

@@ -1,14 +1,12 @@
 import { Button, Stack } from '@chakra-ui/react';
 import type { Bike, Ride } from '@halfpitch/contracts';
 import { useQuery } from '@tanstack/react-query';
-import { Link, useSearchParams } from 'react-router-dom';
-import { useSession } from '../../app/session';
+import { Link } from 'react-router-dom';
 import { EmptyState } from '../../components/empty-state';
 import { Loaded } from '../../components/loaded';
 import { PageHeader } from '../../components/page-header';
 import { Panel } from '../../components/panel';
-import { bikeQuery } from '../bikes/api/bike';
-import { bikesQuery } from '../bikes/api/bikes';
+import { useWhoseBikes } from '../bikes/use-whose-bikes';
 import { ridesQuery } from './api/rides';
 import { LogForm } from './log-form';
 import { RideList } from './ride-list';
@@ -51,14 +49,9 @@ function LogPage({ bikes, rides, wanted }: LogPageProps) {
 
 /** The rider's own bikes, or for staff those of the rider whose bike stands in the address. */
 export function LogRide() {
-  const { riderId } = useSession();
-  const [search] = useSearchParams();
-  const wanted = search.get('bike');
-  const named = useQuery({ ...bikeQuery(wanted ?? ''), enabled: riderId === null && wanted !== null });
-  const of = riderId ?? named.data?.riderId;
-  const bikes = useQuery({ ...bikesQuery({ riderId: of }), enabled: of !== undefined });
-  const rides = useQuery({ ...ridesQuery({ riderId: of, size: 50 }), enabled: of !== undefined });
-  if (riderId === null && wanted === null)
+  const { bikeId, riderId, bikes, isNamed } = useWhoseBikes();
+  const rides = useQuery({ ...ridesQuery({ riderId, size: 50 }), enabled: riderId !== undefined });
+  if (!isNamed)
     return (
       <EmptyState title="Whose ride is it?">
         Open the rider’s bike first and log the ride from there.
@@ -70,7 +63,7 @@ export function LogRide() {
       <Loaded query={bikes}>
         {(found) => (
           <Loaded query={rides}>
-            {(last) => <LogPage bikes={found.items} rides={last.items} wanted={wanted} />}
+            {(last) => <LogPage bikes={found.items} rides={last.items} wanted={bikeId} />}
           </Loaded>
         )}
       </Loaded>
