@@ -7,7 +7,7 @@ import { sendReminder } from './api/send-reminder';
 
 type Subject = Pick<SendReminder, 'chainId' | 'kind'>;
 
-/** What the desk does about reminders; each act says what it did, and holding can be taken back. */
+/** What the desk does about reminders; each act says what it did; a waiting letter that was held can be let go again. */
 export function useReminderActs() {
   const client = useQueryClient();
   const refresh = () => client.invalidateQueries({ queryKey: ['reminders'] });
@@ -16,10 +16,11 @@ export function useReminderActs() {
     await refresh();
     toastDone(`The reminder to ${riderName} is on its way.`);
   };
-  const held = async (kept: Promise<Reminder>) => {
+  const held = async (kept: Promise<Reminder>, wasOnItsWay: boolean) => {
     const { id, riderName } = await kept;
     await refresh();
-    toastDone(`The reminder to ${riderName} is held.`, () => void release(id).catch(toastError));
+    const undo = wasOnItsWay ? () => void release(id).catch(toastError) : undefined;
+    toastDone(`The reminder to ${riderName} is held.`, undo);
   };
   return {
     release,
@@ -28,8 +29,8 @@ export function useReminderActs() {
       await refresh();
       toastDone(`A reminder to ${riderName} is on its way.`);
     },
-    /** Held before it is written. */
-    holdAhead: (subject: Subject) => held(sendReminder({ ...subject, again: false, hold: true })),
-    hold: (id: string) => held(holdReminder(id)),
+    /** Held before it is written: there is no letter that an undo could send. */
+    holdAhead: (subject: Subject) => held(sendReminder({ ...subject, again: false, hold: true }), false),
+    hold: (id: string) => held(holdReminder(id), true),
   };
 }

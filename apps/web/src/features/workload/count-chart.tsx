@@ -15,15 +15,17 @@ export default function CountChart({ weeks }: { weeks: Week[] }) {
   }));
   return (
     <ResponsiveContainer width="100%" height="100%">
-      <ComposedChart data={data} margin={margin} barGap={2} accessibilityLayer={false}>
+      <ComposedChart data={data} margin={margin} accessibilityLayer={false}>
         <CartesianGrid stroke={chartColours.grid} vertical={false} />
         <XAxis dataKey="week" {...axis} interval="preserveStartEnd" minTickGap={8} />
+        <XAxis dataKey="week" xAxisId="inner" hide />
         <YAxis width={36} allowDecimals={false} {...axis} />
-        <Legend wrapperStyle={{ color: chartColours.axis }} />
+        <Legend formatter={(name: string) => <span style={{ color: chartColours.ink }}>{name}</span>} />
         <Bar
           {...still}
           name="Treatments"
           dataKey="treatments"
+          maxBarSize={30}
           fill={chartColours.band}
           stroke={chartColours.line}
           radius={3}
@@ -32,6 +34,9 @@ export default function CountChart({ weeks }: { weeks: Week[] }) {
           {...still}
           name="Replacements"
           dataKey="replacements"
+          xAxisId="inner"
+          barSize={9}
+          minPointSize={3}
           fill={chartColours.turning}
           stroke={chartColours.ink}
           radius={3}

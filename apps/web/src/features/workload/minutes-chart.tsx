@@ -11,6 +11,7 @@ import {
 } from 'recharts';
 import { chartColours, chartText } from '../../components/chart-colours';
 import { axis, margin, shortDay } from './week-axes';
+import { whole } from './week-words';
 
 const still = { isAnimationActive: false } as const;
 
@@ -54,7 +55,7 @@ export default function MinutesChart({ load }: { load: Workload }) {
           stroke={chartColours.limit}
           strokeWidth={2}
           label={{
-            value: `${load.minutesPerWeek} minutes there are`,
+            value: `${whole(load.minutesPerWeek)} minutes there are`,
             position: 'insideTopRight',
             dy: -22,
             ...chartText,

@@ -1,4 +1,4 @@
-import { Flex, Stack, Text } from '@chakra-ui/react';
+import { SimpleGrid, Stack, Text } from '@chakra-ui/react';
 import { NumberField } from '../../components/fields/number-field';
 import { Panel } from '../../components/panel';
 import { SwitchField } from './switch-field';
@@ -11,7 +11,7 @@ export function PolicySettings() {
         Each night a rider is written to whose chain falls due within so many days with at least this chance;
         once for each treatment, and never a rider who has stopped the letters.
       </Text>
-      <Flex gap="6" wrap="wrap" mb="4">
+      <SimpleGrid columns={{ base: 1, md: 2 }} gap="5" mb="4">
         <NumberField name="reminderPolicy.days" label="Look ahead" unit="days" whole />
         <NumberField
           name="reminderPolicy.chance"
@@ -20,7 +20,7 @@ export function PolicySettings() {
           scale={0.01}
           decimals={0}
         />
-      </Flex>
+      </SimpleGrid>
       <Stack gap="1" align="flex-start">
         <SwitchField name="reminderPolicy.lubrication" label="Write about wax and oil" />
         <SwitchField name="reminderPolicy.replacement" label="Write about worn chains" />
