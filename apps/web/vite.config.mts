@@ -14,7 +14,11 @@ export default defineConfig({
     target: 'es2023',
     // Chakra's own theme is made by calls the bundler takes for needed: 25 kB of parts that nobody shows.
     rolldownOptions: {
-      treeshake: { manualPureFunctions: ['defineConfig', 'defineSlotRecipe', 'defineRecipe'] },
+      treeshake: {
+        manualPureFunctions: ['defineConfig', 'defineSlotRecipe', 'defineRecipe'],
+        // A page takes from the contracts what it names, not what the barrel lists.
+        moduleSideEffects: [{ test: /libs[\\/]contracts[\\/]/, sideEffects: false }],
+      },
     },
   },
   server: { proxy: { '/api': process.env.API_URL ?? 'http://127.0.0.1:4190' } },

@@ -12,13 +12,16 @@ interface FeatureRoutes {
 
 const features = Object.values(import.meta.glob<FeatureRoutes>('../features/*/routes.tsx', { eager: true }));
 
+/** Pages that need no sign-in. */
+export const publicTree: RouteObject[] = features.flatMap((feature) => feature.publicRoutes ?? []);
+
 /** All pages. Each feature lists its own; their code comes when they are opened. */
 export const routeTree: RouteObject[] = [
   {
     ErrorBoundary: PageError,
     HydrateFallback: PageLoading,
     children: [
-      ...features.flatMap((feature) => feature.publicRoutes ?? []),
+      ...publicTree,
       {
         lazy: () => import('./shell/signed-in'),
         children: [

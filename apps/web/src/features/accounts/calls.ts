@@ -1,4 +1,4 @@
-import { done, invitationView, session } from '@halfpitch/contracts';
+import { done, session } from '@halfpitch/contracts';
 import type {
   acceptInvitation,
   accountChange,
@@ -6,7 +6,6 @@ import type {
   registerWorkshop,
   signIn,
 } from '@halfpitch/contracts';
-import { queryOptions } from '@tanstack/react-query';
 import type { z } from 'zod';
 import { request } from '../../app/api';
 
@@ -27,13 +26,6 @@ export const putPassword = (body: z.output<typeof changePassword>) =>
 
 export const putAccount = (body: z.output<typeof accountChange>) =>
   request('/account', { method: 'PUT', body, schema: done });
-
-export const invitationQuery = (token: string) =>
-  queryOptions({
-    queryKey: ['invitation', token],
-    queryFn: () => request(`/invitations/${encodeURIComponent(token)}`, { schema: invitationView }),
-    staleTime: Infinity,
-  });
 
 export const postInvitation = (token: string, body: z.output<typeof acceptInvitation>) =>
   request(`/invitations/${encodeURIComponent(token)}`, { method: 'POST', body, schema: done });

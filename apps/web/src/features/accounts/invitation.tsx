@@ -8,8 +8,9 @@ import { Form } from '../../components/form';
 import { LoadingState } from '../../components/loading-state';
 import { PageHeader } from '../../components/page-header';
 import { SubmitButton } from '../../components/submit-button';
-import { invitationQuery, postInvitation } from './calls';
+import { postInvitation } from './calls';
 import { useEnter } from './entry';
+import { invitationQuery } from './invitation-query';
 import { NewPasswordField } from './new-password-field';
 
 const roleWords: Record<Role, string> = {
