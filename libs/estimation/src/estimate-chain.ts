@@ -3,6 +3,7 @@ import { factorAhead } from './distance/factor-ahead';
 import { chainAlerts } from './due/alerts';
 import { dueCdf, dueWindow } from './due/due-distribution';
 import { atomsOf } from './due/km-left';
+import { lubricationWindow } from './due/lubrication';
 import { whyMoved } from './due/reasons';
 import type { DueState } from './due/state';
 import { elongationCurve } from './elongation/curve';
@@ -30,11 +31,9 @@ export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEs
   const treatment = currentTreatment(history);
   const life = riderLife(treatment.kind, lifeObservations(history, usage), fleet.life);
   const lubeKmUsed = usage.lubeKmBetween(treatment.since, today);
-  const lubeLeft = atomsOf((p) => (lifeQuantile(life, p) - lubeKmUsed) / perKm.lube);
   const limitDays = history.calendarLimitDays[regime];
-  const lubrication = history.fitted
-    ? dueWindow(dueCdf(lubeLeft, forecast), today, limitDays === null ? null : treatment.since + limitDays)
-    : null;
+  const running = { life, since: treatment.since, lubeKmUsed, lubePerKm: perKm.lube, limitDays };
+  const lubrication = history.fitted ? lubricationWindow(running, today, forecast) : null;
 
   const prior = fleet.elongation.rate[regime][bikeKind];
   const readings = placed(history, usage.wearKmAt);

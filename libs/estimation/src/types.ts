@@ -120,6 +120,8 @@ export interface DueWindow {
   chanceNow: number;
   /** Chance that the (first) due day falls in week w from today, w = 0..25. */
   weeklyChance: readonly number[];
+  /** Lubrication: chance that a treatment given today falls due in week w from today, for renewals ahead. */
+  renewal?: readonly number[];
   /** What decides: the distance, or the calendar limit. */
   decidedBy: 'distance' | 'calendar';
 }

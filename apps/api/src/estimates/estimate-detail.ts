@@ -66,6 +66,7 @@ export function toDetail(estimate: ChainEstimate): EstimateDetail {
     weekly: {
       lubrication: lubrication && lubrication.weeklyChance.map(chance),
       replacement: replacement.weeklyChance.map(chance),
+      renewal: lubrication?.renewal?.map(chance),
     },
   };
 }

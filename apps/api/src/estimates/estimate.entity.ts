@@ -4,8 +4,8 @@ import { TenantEntity } from '../database/tenant-entity';
 
 /** What of an estimate is kept as one document; the rest are columns of their own or derived. */
 export type EstimateDetail = Omit<ChainEstimate, 'id' | 'chainId' | 'madeAt'> & {
-  /** Chance of falling due in week w from the day it was made, w = 0..25: what the workload is summed from. */
-  weekly: { lubrication: number[] | null; replacement: number[] };
+  /** Chance of falling due in week w from the day it was made, w = 0..25: what the workload is summed from; of a treatment given then, `renewal`. */
+  weekly: { lubrication: number[] | null; replacement: number[]; renewal?: number[] };
 };
 
 /** The last estimate of each day is kept, so that what was said can be held against what happened. */

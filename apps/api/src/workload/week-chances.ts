@@ -7,6 +7,8 @@ export interface ChainChance {
   dipped: boolean;
   lubrication: number[] | null;
   replacement: number[];
+  /** Chance that a treatment given now falls due in week w from now. */
+  renewal?: number[];
 }
 
 const MOST_CHAINS = 20;

@@ -44,6 +44,7 @@ function toChance(
     riderName,
     dipped: regime === 'immersion-wax',
     lubrication: weekly.lubrication && shift({ now: now.lubricationNow ?? 0, weekly: weekly.lubrication }),
+    renewal: weekly.renewal,
     replacement: shift({ now: now.replacementNow, weekly: weekly.replacement }),
   };
 }
@@ -62,9 +63,9 @@ export class WorkloadService {
     const monday = mondayOf(dayOf(this.clock.today(timeZone)));
     const rows = await this.db.manager.query<Row[]>(NEWEST);
     const chains = rows.map((row) => toChance(row, monday));
-    const visits = chains.map(({ lubrication, dipped }) => ({
+    const visits = chains.map(({ lubrication, renewal, dipped }) => ({
       dipped,
-      chances: lubrication ? withRenewals(lubrication, WEEKS) : [],
+      chances: lubrication ? withRenewals(lubrication, WEEKS, renewal) : [],
     }));
     return {
       minutesPerWeek: settings.bench.minutesPerWeek,

@@ -5,11 +5,13 @@ import { pmfQuantile, poissonBinomial } from './poisson-binomial';
 export interface ChainChances {
   lubrication: readonly number[] | null;
   replacement: readonly number[];
+  /** Chance that a treatment given now falls due in week w from now; without it, as the present one did. */
+  renewal?: readonly number[];
 }
 
 export interface WorkloadOptions {
   weeks: number;
-  /** Chance that a rider whose chain is due comes in at all. */
+  /** Chance that the rider of a chain that is due comes in that week; who does not is still due in the next. */
   comes: number;
 }
 
@@ -18,23 +20,43 @@ export interface WeekLoad {
   replacements: Band & { mean: number };
 }
 
-/** Chance of a visit in each week, renewals included: a treatment given in week s falls due again as a fresh one would. */
-export function withRenewals(first: readonly number[], weeks: number): number[] {
-  const renewal = first.slice(0, weeks);
-  for (let w = 0; w < weeks; w++) {
-    for (let s = 0; s < w; s++) renewal[w] = renewal[w]! + renewal[s]! * (first[w - s] ?? 0);
-  }
-  return renewal.map((chance) => Math.min(chance, 1));
+/** Chance of a visit in each week when what fell due waits until its rider comes. */
+function visits(due: readonly number[], weeks: number, comes: number, again: readonly number[]): number[] {
+  const falling = Array.from({ length: weeks }, (_, w) => due[w] ?? 0);
+  let waiting = 0;
+  return falling.map((_, w) => {
+    waiting += falling[w]!;
+    const visit = Math.min(waiting * comes, 1);
+    waiting -= visit;
+    // What is treated this week falls due again as a fresh treatment does; within the week counts as the next.
+    for (let later = w + 1; later < weeks; later++)
+      falling[later]! += visit * ((again[later - w] ?? 0) + (later === w + 1 ? (again[0] ?? 0) : 0));
+    return visit;
+  });
+}
+
+/**
+ * Chance of a visit in each week, renewals included: a treatment given in week s falls due again after a fresh
+ * treatment's life (`renewal`, by weeks from the treatment), not after what is left of the present one.
+ */
+export function withRenewals(
+  first: readonly number[],
+  weeks: number,
+  renewal: readonly number[] = first,
+  comes = 1,
+): number[] {
+  return visits(first, weeks, comes, renewal);
 }
 
 /** Expected treatments and replacements per week: chains are independent, so each week's count is Poisson-binomial. */
 export function workload(chains: readonly ChainChances[], { weeks, comes }: WorkloadOptions): WeekLoad[] {
-  const lubrication = chains.flatMap(({ lubrication }) =>
-    lubrication ? [withRenewals(lubrication, weeks)] : [],
+  const treating = chains.flatMap(({ lubrication, renewal }) =>
+    lubrication ? [withRenewals(lubrication, weeks, renewal, comes)] : [],
   );
+  const replacing = chains.map(({ replacement }) => visits(replacement, weeks, comes, []));
   return Array.from({ length: weeks }, (_, w) => ({
-    treatments: summary(lubrication.map((chances) => (chances[w] ?? 0) * comes)),
-    replacements: summary(chains.map(({ replacement }) => Math.min((replacement[w] ?? 0) * comes, 1))),
+    treatments: summary(treating.map((chances) => chances[w]!)),
+    replacements: summary(replacing.map((chances) => chances[w]!)),
   }));
 }
 
