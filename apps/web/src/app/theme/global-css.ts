@@ -9,6 +9,7 @@ export const globalCss = defineGlobalStyles({
     colorPalette: 'steel',
     colorScheme: 'light',
     scrollPaddingTop: '4rem',
+    scrollPaddingBottom: { base: '6rem', md: '2rem' },
   },
   'html.dark': { colorScheme: 'dark' },
   body: { fontFamily: 'body', fontSize: 'md', minHeight: '100dvh', textRendering: 'optimizeLegibility' },
