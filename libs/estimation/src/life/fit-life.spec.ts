@@ -6,8 +6,8 @@ import { fitLife, fitLifeWithErrors, RiderLives } from './fit-life';
 import type { LifeObservation } from './rider-life';
 
 const FLEETS = 500;
-const RIDERS = 30;
-const VISITS = 8;
+const RIDERS = 24;
+const VISITS = 6;
 
 /** A fleet as it would be found on arrival: riders come in at some point about the median life of what they have. */
 function generatedFleet(truth: LifeModel, random: () => number): RiderLives[] {

@@ -1,5 +1,6 @@
 import { normalCdf, normalPdf } from './normal';
 
+const { floor } = Math;
 const REACH = 8.5;
 const PER_UNIT = 32;
 const SIZE = 2 * REACH * PER_UNIT;
@@ -12,7 +13,7 @@ export function tabledCdf(z: number): number {
   const t = (z + REACH) * PER_UNIT;
   if (!(t > 0)) return 0;
   if (t >= SIZE) return 1;
-  const i = Math.floor(t);
+  const i = floor(t);
   const f = t - i;
   const g = 1 - f;
   return (
