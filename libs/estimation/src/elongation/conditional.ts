@@ -56,6 +56,7 @@ function cubic(sums: Float64Array, density: Float64Array, i: number, t: number):
   const a = sums[i]!;
   const b = sums[i + 1]!;
   const u = 1 - t;
-  const value = u * u * (1 + 2 * t) * a + t * t * (3 - 2 * t) * b + t * u * (u * density[i]! - t * density[i + 1]!);
+  const value =
+    u * u * (1 + 2 * t) * a + t * t * (3 - 2 * t) * b + t * u * (u * density[i]! - t * density[i + 1]!);
   return Math.min(Math.max(value, a), b);
 }

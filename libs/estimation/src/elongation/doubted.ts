@@ -14,7 +14,10 @@ export function doubtedReadings(
   const chances = doubts(posterior.grid, posterior.gauges);
   return readings
     .filter(({ id }) => (chances.get(id) ?? 0) > 0.5)
-    .map((reading) => ({ readingId: reading.id, because: why(reading, readings, chances, posterior, model) }));
+    .map((reading) => ({
+      readingId: reading.id,
+      because: why(reading, readings, chances, posterior, model),
+    }));
 }
 
 const shownBy = (reading: PlacedReading): number => worstPlace(reading) ?? reading.lower ?? reading.upper!;

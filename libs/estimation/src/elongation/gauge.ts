@@ -26,7 +26,11 @@ export interface Gauge {
  * what the readings leave of the offset. The trapezoidal rule on such a grid is exact to many digits for integrands that
  * are nearly Gaussian.
  */
-export function gaugeOf(readings: readonly PlacedReading[], model: ElongationModel, mostRunIn: number): Gauge {
+export function gaugeOf(
+  readings: readonly PlacedReading[],
+  model: ElongationModel,
+  mostRunIn: number,
+): Gauge {
   const errors = model.methods[readings[0]!.method];
   const { offset, offsetSd, noiseSd } = errors;
   const left = 1 / Math.sqrt(1 / offsetSd ** 2 + readings.length / noiseSd ** 2);
@@ -50,13 +54,15 @@ export function gaugeOf(readings: readonly PlacedReading[], model: ElongationMod
  */
 export function fillRow({ tables, first }: Gauge, rate: number, row: Float64Array): number {
   row.fill(0);
-  for (const table of tables)
-    addAlong(table, table.log, first + (rate * table.reading.wearKm) / 1000, row);
+  for (const table of tables) addAlong(table, table.log, first + (rate * table.reading.wearKm) / 1000, row);
   return exponentiate(row);
 }
 
 /** spread[j · nodes + k] = density of node k when run-in is the j-th, baseline readings counted in, times the step. */
-export function spreadOf({ errors, first, step, nodes, baselines }: Gauge, runIns: Float64Array): Float64Array {
+export function spreadOf(
+  { errors, first, step, nodes, baselines }: Gauge,
+  runIns: Float64Array,
+): Float64Array {
   const spread = new Float64Array(runIns.length * nodes);
   for (let j = 0; j < runIns.length; j++) {
     const row = spread.subarray(j * nodes, (j + 1) * nodes);

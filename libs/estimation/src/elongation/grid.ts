@@ -16,7 +16,7 @@ export interface Grid {
 }
 
 /** Prior sd of the log run-in that are looked at, either way. */
-export const RUN_IN_REACH = 4;
+export const RUN_IN_REACH = 3.5;
 const RATE_REACH = 6;
 /** A node this far below the top in the log carries nothing that shows. */
 const NEGLIGIBLE = 18;

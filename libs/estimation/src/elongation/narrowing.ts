@@ -51,5 +51,8 @@ function momentsOf({ rate, runIn, log }: ElongationPosterior['grid'], wearKm: nu
   const limitVariance = yy / w - (y / w) ** 2;
   if (!(elongationVariance > 1e-12) || !(limitVariance > 1e-12)) return null;
   const covariance = ey / w - (e / w) * (y / w);
-  return { elongationVariance, together: Math.min(covariance ** 2 / (elongationVariance * limitVariance), 1) };
+  return {
+    elongationVariance,
+    together: Math.min(covariance ** 2 / (elongationVariance * limitVariance), 1),
+  };
 }
