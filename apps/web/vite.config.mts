@@ -12,6 +12,7 @@ export default defineConfig({
     outDir: here('../../dist/apps/web'),
     emptyOutDir: true,
     target: 'es2023',
+    modulePreload: { polyfill: false },
     // Chakra's own theme is made by calls the bundler takes for needed: 25 kB of parts that nobody shows.
     rolldownOptions: {
       treeshake: {

@@ -1,7 +1,16 @@
-import { defineSlotRecipe } from '@chakra-ui/react/styled-system';
+import { defineRecipe, defineSlotRecipe } from '@chakra-ui/react/styled-system';
+import { field } from './overrides';
 
 /** Where the house differs, in the parts of the pages behind the sign-in. */
-export const moreOverrides = {
+export const moreRecipeOverrides = {
+  textarea: defineRecipe({ variants: { variant: { outline: field }, size: { md: { textStyle: 'md' } } } }),
+};
+
+export const moreSlotOverrides = {
+  nativeSelect: defineSlotRecipe({
+    slots: [],
+    variants: { variant: { outline: { field } }, size: { md: { field: { textStyle: 'md', h: '11' } } } },
+  }),
   dialog: defineSlotRecipe({
     slots: [],
     base: { backdrop: { bg: 'rgba(20, 21, 23, 0.55)' }, content: { textStyle: 'md' } },

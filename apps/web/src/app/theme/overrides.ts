@@ -1,6 +1,6 @@
 import { defineRecipe, defineSlotRecipe } from '@chakra-ui/react/styled-system';
 
-const field = { bg: 'bg.panel', borderColor: 'border.control' };
+export const field = { bg: 'bg.panel', borderColor: 'border.control' };
 const comfortable = { textStyle: 'md', '--input-height': 'sizes.11' };
 
 /** Where the house differs: targets of 44 px, seen edges on controls, 16 px writing in fields. */
@@ -18,7 +18,6 @@ export const recipeOverrides = {
   }),
   heading: defineRecipe({ base: { letterSpacing: '-0.01em', textWrap: 'balance' } }),
   input: defineRecipe({ variants: { variant: { outline: field }, size: { md: comfortable } } }),
-  textarea: defineRecipe({ variants: { variant: { outline: field }, size: { md: { textStyle: 'md' } } } }),
   link: defineRecipe({
     defaultVariants: { variant: 'underline' },
     variants: {
@@ -42,9 +41,5 @@ export const slotRecipeOverrides = {
       errorText: { textStyle: 'sm', fontWeight: 'semibold' },
       requiredIndicator: { color: 'fg.muted' },
     },
-  }),
-  nativeSelect: defineSlotRecipe({
-    slots: [],
-    variants: { variant: { outline: { field } }, size: { md: { field: { textStyle: 'md', h: '11' } } } },
   }),
 };

@@ -1,5 +1,4 @@
 import {
-  badgeRecipe,
   buttonRecipe,
   containerRecipe,
   fieldSlotRecipe,
@@ -8,16 +7,13 @@ import {
   iconRecipe,
   inputRecipe,
   linkRecipe,
-  nativeSelectSlotRecipe,
   separatorRecipe,
   skeletonRecipe,
   spinnerRecipe,
-  textareaRecipe,
 } from '@chakra-ui/react/theme';
 
 /** Only the parts that are used are given their styles: each one more costs on the first page. */
 export const recipes = {
-  badge: badgeRecipe,
   button: buttonRecipe,
   container: containerRecipe,
   heading: headingRecipe,
@@ -27,11 +23,9 @@ export const recipes = {
   separator: separatorRecipe,
   skeleton: skeletonRecipe,
   spinner: spinnerRecipe,
-  textarea: textareaRecipe,
 };
 
 export const slotRecipes = {
   field: fieldSlotRecipe,
   fieldset: fieldsetSlotRecipe,
-  nativeSelect: nativeSelectSlotRecipe,
 };

@@ -1,6 +1,6 @@
 import { chakra, Flex, Text } from '@chakra-ui/react';
 import { useId } from 'react';
-import { percent } from '../../app/format';
+import { percent } from '../../app/figures';
 import { StateWord } from '../state-word';
 import { drynessOf, drynessWords, rampColour } from './dryness';
 import { filledTo, PITCH, platePath, ROLLER, ROLLERS, rollerX } from './link-shape';

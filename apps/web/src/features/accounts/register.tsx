@@ -1,6 +1,7 @@
 import { Link } from '@chakra-ui/react';
 import { registerWorkshop } from '@halfpitch/contracts';
 import { Link as RouterLink } from 'react-router-dom';
+import { MoreParts } from '../../app/theme/more-provider';
 import { Form } from '../../components/form';
 import { PageHeader } from '../../components/page-header';
 import { SubmitButton } from '../../components/submit-button';
@@ -18,7 +19,7 @@ const here = Intl.DateTimeFormat().resolvedOptions().timeZone;
 export function Register() {
   const enter = useEnter();
   return (
-    <>
+    <MoreParts>
       <PageHeader
         title="Register a workshop"
         lead="You become its owner, and invite staff and riders afterwards."
@@ -54,6 +55,6 @@ export function Register() {
           <RouterLink to="/sign-in">Sign in instead</RouterLink>
         </Link>
       </Form>
-    </>
+    </MoreParts>
   );
 }
