@@ -13,6 +13,7 @@ import type { PlacedReading } from './elongation/model';
 import { elongationPosterior } from './elongation/posterior';
 import { lifeQuantile, riderLife } from './life/rider-life';
 import { currentTreatment, lifeObservations } from './life/treatments';
+import { sparseQuantile } from './math/sparse-quantile';
 import { forecastRiding } from './riding';
 import type { ChainEstimate, ChainHistory, FleetModel } from './types';
 import { chainUsage } from './usage';
@@ -38,7 +39,7 @@ export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEs
   const prior = fleet.elongation.rate[regime][bikeKind];
   const readings = placed(history, usage.wearKmAt);
   const posterior = elongationPosterior(readings, prior);
-  const left = (p: number) => posterior.wearKmLeft(usage.wearKm, limitPct, p);
+  const left = sparseQuantile((p) => posterior.wearKmLeft(usage.wearKm, limitPct, p));
   const kmPerWearKm = 1 / (perKm.wear * Math.max(history.shareOfRiding, LEAST_SHARE));
   const replacement = dueWindow(
     dueCdf(

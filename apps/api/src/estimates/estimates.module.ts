@@ -7,12 +7,21 @@ import { EstimatesService } from './estimates.service';
 import { EstimatesTasks } from './estimates.tasks';
 import { NightlyClock } from './nightly.clock';
 import { Estimator } from './estimator.service';
+import { RefitTasks } from './refit.tasks';
 import { UsageService } from './usage.service';
 
 @Module({
   imports: [ChainsModule, WorkshopModule],
   controllers: [EstimatesController],
-  providers: [ChainHistories, EstimatesService, EstimatesTasks, Estimator, NightlyClock, UsageService],
+  providers: [
+    ChainHistories,
+    EstimatesService,
+    EstimatesTasks,
+    Estimator,
+    NightlyClock,
+    RefitTasks,
+    UsageService,
+  ],
   exports: [EstimatesService, Estimator, NightlyClock],
 })
 export class EstimatesModule {}

@@ -5,6 +5,7 @@ import { QueueService } from '../jobs/queue.service';
 import type { Tasks } from '../jobs/tasks';
 import { WorkshopService } from '../workshop/workshop.service';
 import { Estimator } from './estimator.service';
+import { refitIsDue } from './refit';
 
 /** Chains loaded, estimated and kept in one transaction: bounds the memory, what a crash undoes, and how long they are locked. */
 const BATCH = 50;
@@ -46,6 +47,14 @@ export class EstimatesTasks implements OnModuleInit {
       });
     } while (ids.length === BATCH);
     await this.db.run({ workshopId }, () => this.finish(workshopId, today));
+    await this.db.run({ workshopId }, () => this.askForRefit(workshopId, today));
+  }
+
+  /** Once a week the night ends with learning from what it read. */
+  private async askForRefit(workshopId: string, today: string): Promise<void> {
+    const { fleetModel } = await this.workshops.current(workshopId);
+    if (refitIsDue(fleetModel, today))
+      await this.queue.send('refit-workshop', { workshopId }, { key: workshopId });
   }
 
   private async nextBatch(today: string, after = '00000000-0000-0000-0000-000000000000'): Promise<string[]> {

@@ -2,6 +2,7 @@
 export interface Tasks {
   'estimate-chain': { workshopId: string; chainId: string };
   'estimate-workshop': { workshopId: string };
+  'refit-workshop': { workshopId: string };
   'import-rides': { workshopId: string; importId: string };
   'send-mail': { mailId: string; workshopId?: string; accountId?: string };
 }
@@ -14,6 +15,13 @@ export const QUEUES = {
     policy: 'short',
     retryLimit: 5,
     retryDelay: 60,
+    retryBackoff: true,
+    expireInSeconds: 3600,
+  },
+  'refit-workshop': {
+    policy: 'short',
+    retryLimit: 2,
+    retryDelay: 600,
     retryBackoff: true,
     expireInSeconds: 3600,
   },

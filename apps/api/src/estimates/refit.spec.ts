@@ -1,0 +1,25 @@
+import { defaultFleetModel } from '@halfpitch/estimation';
+import type { LifeObservation } from '@halfpitch/estimation';
+import { refit, refitIsDue } from './refit';
+
+const dry: LifeObservation = { kind: 're-wax', lubeKm: 160, arrival: 'dry' };
+
+it('is due where nothing was learned yet, and a week after', () => {
+  const model = (version: string) => ({ ...defaultFleetModel(), version });
+  expect(refitIsDue(null, '2026-12-01')).toBe(true);
+  expect(refitIsDue(model('default-1'), '2026-12-01')).toBe(true);
+  expect(refitIsDue(model('learned-2026-11-25'), '2026-12-01')).toBe(false);
+  expect(refitIsDue(model('learned-2026-11-24'), '2026-12-01')).toBe(true);
+});
+
+it('learns a shorter life from chains that came in dry, and is the same when done again', () => {
+  const lives = new Map([
+    ['a', [dry, dry]],
+    ['b', [dry]],
+  ]);
+  const learned = refit(null, lives, '2026-12-01');
+  expect(learned.version).toBe('learned-2026-12-01');
+  expect(learned.life.kinds['re-wax'].median).toBeLessThan(300);
+  expect(learned.life.kinds['re-wax'].observations).toBe(3);
+  expect(refit(learned, lives, '2026-12-01')).toEqual(learned);
+});
