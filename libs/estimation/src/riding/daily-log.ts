@@ -9,12 +9,25 @@ export interface DailyLog {
   rideDays: Int32Array;
 }
 
-/** Daily km from the first ride up to and including `last`; later rides and distances of nothing are left out. */
+/** Thirty years: what is older says nothing of the riding ahead. */
+const LONGEST_DAYS = 10_957;
+
+/** Daily km from the first ride up to and including `last`; later rides, far older ones and distances of nothing are left out. */
 export function dailyLog(rides: readonly { day: Day; km: number }[], last: Day): DailyLog {
+  const counts = (ride: { day: Day; km: number }) =>
+    ride.km > 0 && ride.day <= last && ride.day > last - LONGEST_DAYS;
   let first = last + 1;
-  for (const { day, km } of rides) if (km > 0 && day < first) first = day;
-  const km = new Float64Array(Math.max(last - first + 1, 0));
-  for (const ride of rides) if (ride.km > 0 && ride.day <= last) km[ride.day - first]! += ride.km;
+  for (const ride of rides) if (counts(ride) && ride.day < first) first = ride.day;
+  const km = new Float64Array(last - first + 1);
+  for (const ride of rides) if (counts(ride)) km[ride.day - first]! += ride.km;
+  return withSums(first, km);
+}
+
+/** The same log as if it had begun on day index `from`. */
+export const cutBefore = ({ first, km }: DailyLog, from: number): DailyLog =>
+  withSums(first + from, km.subarray(from));
+
+function withSums(first: Day, km: Float64Array): DailyLog {
   const sums = new Float64Array(km.length + 1);
   const rideDays = new Int32Array(km.length + 1);
   for (let i = 0; i < km.length; i++) {

@@ -1,4 +1,4 @@
-import type { LearnedRiding } from './model';
+import type { Coefficients } from './model';
 
 /** How strongly a feature's effect may change with the distance, relative to the effect itself. */
 const CHANGE_WITH_KM = 0.55;
@@ -11,7 +11,7 @@ export const logKm = (km: number): number => Math.log(Math.min(Math.max(km, 100)
 export function designRow(
   features: readonly number[],
   km: number,
-  { mean, sd }: Pick<LearnedRiding, 'mean' | 'sd'>,
+  { mean, sd }: Pick<Coefficients, 'mean' | 'sd'>,
 ): Float64Array {
   const n = features.length;
   const row = new Float64Array(2 * n + 3);

@@ -1,9 +1,11 @@
 import { LEVELS } from '../types';
+import { blankQuantiles } from './blank';
 import { crpsObjective, Lesson } from './crps-loss';
+import { defaultRidingModel } from './default-model';
 import { designRow, scaleLength } from './design';
 import { minimise } from './lbfgs';
-import { Outcome, outcomesOf, RiderLog, toDailyLogs } from './lessons';
-import type { LearnedRiding } from './model';
+import { longOutcomes, newcomerOutcomes, Outcome, outcomesOf, RiderLog, toDailyLogs } from './lessons';
+import type { Coefficients, LearnedRiding } from './model';
 import { quantilesAt } from './quantiles';
 import { fleetSeason } from './season';
 
@@ -14,6 +16,8 @@ const FOLD_ITERATIONS = 60;
 const PENALTIES = { location: 0.03, scale: 0.1 };
 /** Long logs weigh more, but less than by their length. */
 const LENGTH_POWER = -0.25;
+/** Fewer outcomes than coefficients teach nothing: the shipped model stays. */
+const FEWEST_OUTCOMES = 600;
 const COVERAGE = 0.8;
 
 /** Learns how riding goes on from riders' logs; deterministic, seconds for some dozens of riders. */
@@ -21,15 +25,22 @@ export function fitRidingModel(riders: readonly RiderLog[]): LearnedRiding {
   const logs = toDailyLogs(riders);
   const season = fleetSeason(logs);
   const outcomes = outcomesOf(logs, season, STEP_DAYS);
-  const model = fitOutcomes(outcomes, season, ITERATIONS);
+  const newcomers = newcomerOutcomes(logs, season);
+  const long = longOutcomes(logs);
+  if (outcomes.length < FEWEST_OUTCOMES || long.length === 0) return defaultRidingModel;
   return {
-    ...model,
-    spread: honestSpread(outcomesOf(logs, season, 2 * STEP_DAYS), season),
+    version: 'learned-2',
+    season,
+    ...fitOutcomes(outcomes, ITERATIONS),
+    spread: honestSpread(outcomesOf(logs, season, 2 * STEP_DAYS)),
+    newcomer: { ...fitOutcomes(newcomers, ITERATIONS), spread: honestSpread(newcomers) },
+    blank: blankQuantiles(long),
     riders: logs.length,
+    origins: outcomes.length,
   };
 }
 
-function fitOutcomes(outcomes: readonly Outcome[], season: number[], iterations: number): LearnedRiding {
+function fitOutcomes(outcomes: readonly Outcome[], iterations: number): Coefficients {
   const standard = standardise(outcomes);
   const lessons = toLessons(outcomes, standard);
   const scaleSize = scaleLength(standard.mean.length);
@@ -41,26 +52,22 @@ function fitOutcomes(outcomes: readonly Outcome[], season: number[], iterations:
   const x = minimise(crpsObjective(lessons, scaleSize, PENALTIES), start, iterations);
   const round = (values: Float64Array) => Array.from(values, (v) => Math.round(1e5 * v) / 1e5);
   return {
-    version: 'learned-1',
-    season,
     ...standard,
     location: round(x.subarray(0, size)),
     scale: [0, ...round(x.subarray(size, size + scaleSize - 1))],
     z: round(x.subarray(size + scaleSize - 1)).sort((a, b) => a - b),
     spread: 1,
-    riders: new Set(outcomes.map(({ rider }) => rider)).size,
-    origins: outcomes.length,
   };
 }
 
 /** The width at which windows for riders left out of the fit hold as often as they say. */
-function honestSpread(outcomes: readonly Outcome[], season: number[]): number {
+function honestSpread(outcomes: readonly Outcome[]): number {
   const misses: number[] = [];
   for (let fold = 0; fold < FOLDS; fold++) {
     const taught = outcomes.filter(({ rider }) => rider % FOLDS !== fold);
     const left = outcomes.filter(({ rider }) => rider % FOLDS === fold);
     if (taught.length === 0 || left.length === 0) return 1;
-    const model = fitOutcomes(taught, season, FOLD_ITERATIONS);
+    const model = fitOutcomes(taught, FOLD_ITERATIONS);
     for (const outcome of left) misses.push(neededSpread(outcome, model));
   }
   misses.sort((a, b) => a - b);
@@ -69,7 +76,7 @@ function honestSpread(outcomes: readonly Outcome[], season: number[]): number {
 }
 
 /** The smallest width factor with which P10 to P90 would have held this outcome. */
-function neededSpread({ features, km, days, horizon }: Outcome, model: LearnedRiding): number {
+function neededSpread({ features, km, days, horizon }: Outcome, model: Coefficients): number {
   const holds = (spread: number) => {
     const q = quantilesAt({ ...model, spread }, features, km);
     return days >= Math.min(q[1]!, horizon) && days <= (q[9]! >= horizon ? horizon : q[9]!);

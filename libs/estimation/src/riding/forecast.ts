@@ -1,15 +1,10 @@
 import { Band, Day, LEVELS, PlannedRiding, RidingForecast, RidingModel } from '../types';
-import { dailyLog, DailyLog } from './daily-log';
+import { dailyLog } from './daily-log';
 import { defaultRidingModel } from './default-model';
-import { HORIZON_DAYS, LearnedRiding, TAUGHT_KM } from './model';
+import { HORIZON_DAYS, LearnedRiding } from './model';
+import { NODES_KM, quantileTable } from './quantile-table';
 import { isQuiet } from './quiet';
-import { quantilesAt } from './quantiles';
-import { logView } from './view';
 
-/** Distances at which the quantiles are worked out; others are read between them on a log-log scale. */
-const NODES_KM = [10, 50, 150, 300, 600, 1000, 1500, 2200, 3000] as const;
-const LAST_TAUGHT = TAUGHT_KM[TAUGHT_KM.length - 1]!;
-const FIRST_TAUGHT = TAUGHT_KM[0];
 /** A quiet log says less of what comes: its windows are this much wider, on the log scale. */
 const QUIET_WIDER = 1.5;
 
@@ -26,29 +21,14 @@ export function forecastRiding(
   const learned = isLearned(model) ? model : defaultRidingModel;
   const log = dailyLog(rides, today);
   const quiet = isQuiet(log);
-  const table = quantileTable(log, quiet ? { ...learned, spread: learned.spread * QUIET_WIDER } : learned);
+  const table = quantileTable(log, learned, quiet ? QUIET_WIDER : 1);
   const daysToReach = (km: number) =>
     LEVELS.map((_, l) => withPlans(planned, today, km, (rest) => readTable(table, l, rest)));
   return { daysToReach, kmPerWeek: kmPerWeek(table), quiet };
 }
 
 const isLearned = (model: RidingModel): model is LearnedRiding =>
-  Array.isArray(model.location) && Array.isArray(model.season);
-
-/** Quantiles at each node: rows by node, made to rise with the distance. */
-function quantileTable(log: DailyLog, model: LearnedRiding): number[][] {
-  const o = log.km.length;
-  const view = o > 0 ? logView(log, o, model.season) : () => model.mean;
-  const at = (km: number) => quantilesAt(model, view(km), km);
-  const first = at(FIRST_TAUGHT);
-  const last = at(LAST_TAUGHT);
-  const rows = NODES_KM.map((km) => {
-    if (km < FIRST_TAUGHT) return first.map((days) => Math.max(days * (km / FIRST_TAUGHT), 1));
-    return km <= LAST_TAUGHT ? at(km) : last.map((days) => days * (km / LAST_TAUGHT));
-  });
-  for (let i = 1; i < rows.length; i++) rows[i] = rows[i]!.map((days, l) => Math.max(days, rows[i - 1]![l]!));
-  return rows;
-}
+  model.version === defaultRidingModel.version && Array.isArray(model.location);
 
 /** Days at level `l` until `km` are ridden, read between the nodes and in proportion beyond them. */
 function readTable(table: readonly number[][], l: number, km: number): number {
@@ -92,7 +72,7 @@ function kmPerWeek(table: readonly number[][]): Band {
   const within28 = (l: number) => {
     let low = 0;
     let high = 4000;
-    while (high - low > 0.5) {
+    while (high - low > 1) {
       const middle = (low + high) / 2;
       if (readTable(table, l, middle) <= 28) low = middle;
       else high = middle;

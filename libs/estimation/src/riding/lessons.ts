@@ -1,8 +1,11 @@
 import type { Day } from '../types';
-import { DailyLog, dailyLog } from './daily-log';
-import { TAUGHT_KM, taughtHorizon } from './model';
+import { cutBefore, DailyLog, dailyLog } from './daily-log';
+import { HORIZON_DAYS, TAUGHT_KM, taughtHorizon } from './model';
 import { firstReaching } from './reach';
 import { logView } from './view';
+
+const NEWCOMER_STEP = 21;
+const NEWCOMER_LENGTHS = [14, 49, 7, 90, 28];
 
 export interface RiderLog {
   rider: string;
@@ -24,23 +27,50 @@ export function outcomesOf(logs: readonly DailyLog[], season: readonly number[],
     const outcomes: Outcome[] = [];
     for (let o = 21; o < log.km.length - 1; o += step) {
       if (log.rideDays[o]! < 4 || log.rideDays[o] === log.rideDays[Math.max(o - 60, 0)]) continue;
-      const ahead = log.sums.subarray(o + 1).map((sum) => sum - log.sums[o]!);
-      const view = logView(log, o, season);
+      outcomes.push(...outcomesAt(log, o, rider, logView(log, o, season)));
+    }
+    return outcomes;
+  });
+}
+
+/** The same outcomes as riders would have met them who had only just begun to log. */
+export function newcomerOutcomes(logs: readonly DailyLog[], season: readonly number[]): Outcome[] {
+  return logs.flatMap((log, rider) => {
+    const outcomes: Outcome[] = [];
+    for (let i = 0, o = 7; o < log.km.length - 1; i++, o += NEWCOMER_STEP) {
+      const length = Math.min(NEWCOMER_LENGTHS[i % NEWCOMER_LENGTHS.length]!, o);
+      if (log.rideDays[o] === log.rideDays[o - length]) continue;
+      const seen = cutBefore(log, o - length);
+      outcomes.push(...outcomesAt(log, o, rider, logView(seen, length, season)));
+    }
+    return outcomes;
+  });
+}
+
+/** What followed every fourth week, with a ride in the 60 days before it, where the log goes on for two years more. */
+export function longOutcomes(logs: readonly DailyLog[]): Outcome[] {
+  return logs.flatMap((log, rider) => {
+    const outcomes: Outcome[] = [];
+    for (let o = 1; o + HORIZON_DAYS < log.km.length; o += 28) {
+      if (log.rideDays[o] === log.rideDays[Math.max(o - 60, 0)]) continue;
       for (const km of TAUGHT_KM) {
-        const horizon = taughtHorizon(km);
-        const reached = firstReaching(ahead, km - 1e-9);
-        if (reached === ahead.length && ahead.length < horizon) continue;
-        const days = Math.min(reached + 1, horizon);
-        outcomes.push({
-          rider,
-          features: view(km),
-          km,
-          days,
-          horizon,
-        });
+        const reached = firstReaching(log.sums.subarray(o + 1), log.sums[o]! + km - 1e-9);
+        const days = Math.min(reached + 1, HORIZON_DAYS);
+        outcomes.push({ rider, features: [], km, days, horizon: HORIZON_DAYS });
       }
     }
     return outcomes;
+  });
+}
+
+/** How long each taught distance took from day index `o`, where the log goes on long enough to tell. */
+function outcomesAt(log: DailyLog, o: number, rider: number, view: (km: number) => number[]): Outcome[] {
+  const ahead = log.sums.subarray(o + 1);
+  return TAUGHT_KM.flatMap((km) => {
+    const horizon = taughtHorizon(km);
+    const reached = firstReaching(ahead, log.sums[o]! + km - 1e-9);
+    if (reached === ahead.length && ahead.length < horizon) return [];
+    return [{ rider, features: view(km), km, days: Math.min(reached + 1, horizon), horizon }];
   });
 }
 

@@ -14,9 +14,7 @@ export const taughtHorizon = (km: number): number =>
  * Quantile l of the days to reach x km: exp(location(f) + spread · exp(scale(f)) · z_l), where f are the features of the
  * log, standardised, and their products with log x.
  */
-export interface LearnedRiding extends RidingModel {
-  /** Riding on each day of the year relative to the mean. */
-  season: number[];
+export interface Coefficients {
   mean: number[];
   sd: number[];
   location: number[];
@@ -24,6 +22,16 @@ export interface LearnedRiding extends RidingModel {
   z: number[];
   /** Factor on the width, so that the windows hold on riders the model was not taught on. */
   spread: number;
+}
+
+/** Coefficients for logs of some months, and what stands in while a log is shorter than that. */
+export interface LearnedRiding extends RidingModel, Coefficients {
+  /** Riding on each day of the year relative to the mean. */
+  season: number[];
+  /** Taught on logs cut down to their last weeks, for riders who have just begun to log. */
+  newcomer: Coefficients;
+  /** For no log at all: days to reach each of TAUGHT_KM at each of LEVELS, over all riders alike. */
+  blank: number[][];
   /** Riders and origins it was taught on. */
   riders: number;
   origins: number;

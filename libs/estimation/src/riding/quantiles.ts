@@ -1,10 +1,10 @@
 import { LEVELS } from '../types';
 import { MAX_LOG_DAYS } from './crps-loss';
 import { designRow } from './design';
-import type { LearnedRiding } from './model';
+import type { Coefficients } from './model';
 
 /** Days to reach `km` at each of LEVELS, from the features of a log (those for this distance among them). */
-export function quantilesAt(model: LearnedRiding, features: readonly number[], km: number): number[] {
+export function quantilesAt(model: Coefficients, features: readonly number[], km: number): number[] {
   const row = designRow(features, km, model);
   let location = 0;
   for (let i = 0; i < row.length; i++) location += row[i]! * model.location[i]!;

@@ -2,27 +2,30 @@ import { DailyLog, kmBetween } from './daily-log';
 import { seasonDay } from './season';
 
 const YEAR = 364;
+const RATE_DAYS = [28, 90, 365];
+const LONGEST_RATE = 365;
 
-/** Possible futures told by simple rules, as km summed by day: each says when so many km would be reached. */
-export type Paths = Float64Array[];
+/** A possible future told by a simple rule: `times` these km, summed by day. */
+export interface Path {
+  sums: Float64Array;
+  times: number;
+}
 
 /** Recent rates carried on through the fleet's season, and last year's riding over again. */
-export function simplePaths(log: DailyLog, o: number, season: readonly number[], days: number): Paths {
+export function simplePaths(log: DailyLog, o: number, season: readonly number[], days: number): Path[] {
   const today = log.first + o;
-  const seasonal = (day: number) => season[seasonDay(day)]!;
-  const rateOver = (w: number) => {
+  const shape = summed(days, (d) => season[seasonDay(today + d)]!);
+  const before = summed(Math.min(LONGEST_RATE, o), (d) => season[seasonDay(today - 1 - d)]!);
+  const carried = RATE_DAYS.map((w) => {
     const span = Math.min(w, o);
-    let past = 7;
-    for (let d = 1; d <= span; d++) past += seasonal(today - d);
-    return (kmBetween(log, o - span, o) + 2.1) / past;
-  };
-  const shape = summed(days, (d) => seasonal(today + d));
-  const carried = [28, 90, 365].map(rateOver).map((rate) => shape.map((x) => x * rate));
+    const seasonal = 7 + (span > 0 ? before[span - 1]! : 0);
+    return { sums: shape, times: (kmBetween(log, o - span, o) + 2.1) / seasonal };
+  });
   if (o < YEAR + 28) return [...carried, carried[2]!, carried[2]!];
   const lastYear = summed(days, (d) => log.km[o - YEAR + (d % YEAR)]!);
   const ratio = (kmBetween(log, o - 90, o) + 20) / (kmBetween(log, o - YEAR - 90, o - YEAR) + 20);
   const scale = Math.sqrt(Math.min(Math.max(ratio, 0.3), 3));
-  return [...carried, lastYear.map((x) => x * scale), lastYear];
+  return [...carried, { sums: lastYear, times: scale }, { sums: lastYear, times: 1 }];
 }
 
 function summed(days: number, of: (d: number) => number): Float64Array {
@@ -33,8 +36,8 @@ function summed(days: number, of: (d: number) => number): Float64Array {
 }
 
 /** Log of the day on which each path reaches `km`, at most `horizon`. */
-export function reachFeatures(paths: Paths, km: number, horizon: number): number[] {
-  return paths.map((path) => Math.log(Math.min(firstReaching(path, km) + 1, horizon)));
+export function reachFeatures(paths: readonly Path[], km: number, horizon: number): number[] {
+  return paths.map(({ sums, times }) => Math.log(Math.min(firstReaching(sums, km / times) + 1, horizon)));
 }
 
 /** First index at which an ascending array reaches `km`; its length when it never does. */

@@ -25,6 +25,8 @@ interface Start {
  */
 export interface Replay {
   log: DailyLog;
+  /** Sums of km up to today. */
+  past: Float64Array;
   today: number;
   starts: readonly Start[];
   kmPerDay: number;
@@ -50,7 +52,13 @@ export function replay(log: DailyLog, o: number): Replay {
     });
   }
   const year = Math.min(365, o);
-  return { log, today: o, starts, kmPerDay: (kmBetween(log, o - year, o) + 20) / (year + 40) };
+  return {
+    log,
+    past: log.sums.subarray(0, o + 1),
+    today: o,
+    starts,
+    kmPerDay: (kmBetween(log, o - year, o) + 20) / (year + 40),
+  };
 }
 
 /**
@@ -58,7 +66,7 @@ export function replay(log: DailyLog, o: number): Replay {
  * plain median. A start that has not got there yet goes on at the year's mean and counts for the part it shows.
  */
 export function replayFeatures(
-  { log, today, starts, kmPerDay }: Replay,
+  { log, past, today, starts, kmPerDay }: Replay,
   km: number,
   horizon: number,
 ): number[] {
@@ -66,47 +74,47 @@ export function replayFeatures(
     const days = Math.log(Math.min(Math.max(km / kmPerDay, 1), horizon));
     return [days, 1, days, 1, days];
   }
-  const past = log.sums.subarray(0, today + 1);
-  const points = starts.map(({ index, seen, recency, season, likeness }) => {
-    const days =
+  const n = starts.length;
+  const days = new Float64Array(n);
+  const shown = new Float64Array(n);
+  starts.forEach(({ index, seen }, i) => {
+    const taken =
       seen >= km
         ? firstReaching(past, log.sums[index]! + km) - index
         : today - index + (km - seen) / kmPerDay;
-    const shown = Math.min(seen / km, 1) + 0.05;
-    return {
-      days: Math.log(Math.min(Math.max(days, 1), horizon)),
-      inSeason: recency * season * shown,
-      like: recency * (season + 0.3) * likeness * shown,
-      shown,
-    };
+    days[i] = Math.log(Math.min(Math.max(taken, 1), horizon));
+    shown[i] = Math.min(seen / km, 1) + 0.05;
   });
-  points.sort((a, b) => a.days - b.days);
-  const days = points.map((point) => point.days);
-  const quantiles = (weights: number[]) => LEVELS.map((p) => weightedQuantile(days, weights, p));
-  const season = quantiles(points.map(({ inSeason }) => inSeason));
-  const like = quantiles(points.map((point) => point.like));
-  const plain = weightedQuantile(
-    days,
-    points.map(({ shown }) => shown),
-    0.5,
-  );
-  return [season[1]!, season[2]! - season[0]!, like[1]!, like[2]! - like[0]!, plain];
+  const order = new Uint16Array(n).map((_, i) => i).sort((a, b) => days[a]! - days[b]!);
+  const quantiles = (weight: (start: Start) => number) =>
+    weightedQuantiles(
+      days,
+      order,
+      shown.map((share, i) => share * weight(starts[i]!)),
+    );
+  const season = quantiles((start) => start.recency * start.season);
+  const like = quantiles((start) => start.recency * (start.season + 0.3) * start.likeness);
+  const plain = quantiles(() => 1);
+  return [season[1]!, season[2]! - season[0]!, like[1]!, like[2]! - like[0]!, plain[1]!];
 }
 
-/** Quantile of ascending values, read between the middles of their weights. */
-function weightedQuantile(values: readonly number[], weights: readonly number[], p: number): number {
+/** Quantiles at LEVELS of values taken in ascending order, read between the middles of their weights. */
+function weightedQuantiles(values: Float64Array, order: Uint16Array, weights: Float64Array): number[] {
   const total = weights.reduce((sum, w) => sum + w, 0);
-  let before = 0;
-  let lastMiddle = 0;
-  for (let i = 0; i < values.length; i++) {
-    const middle = before + weights[i]! / 2;
-    if (middle >= p * total) {
-      if (i === 0) return values[0]!;
-      const share = (p * total - lastMiddle) / (middle - lastMiddle);
-      return values[i - 1]! + share * (values[i]! - values[i - 1]!);
+  return LEVELS.map((p) => {
+    let before = 0;
+    let lastMiddle = 0;
+    let last = values[order[0]!]!;
+    for (const i of order) {
+      const middle = before + weights[i]! / 2;
+      if (middle >= p * total) {
+        const share = before === 0 ? 0 : (p * total - lastMiddle) / (middle - lastMiddle);
+        return last + share * (values[i]! - last);
+      }
+      before += weights[i]!;
+      lastMiddle = middle;
+      last = values[i]!;
     }
-    before += weights[i]!;
-    lastMiddle = middle;
-  }
-  return values[values.length - 1]!;
+    return last;
+  });
 }
