@@ -2,13 +2,15 @@ import { createToaster, Portal, Stack, Toast, Toaster } from '@chakra-ui/react';
 import { X } from 'lucide-react';
 import { MoreParts } from '../app/theme/more-provider';
 
+/** On a phone they come at the head: at the foot they would lie on the button that comes next. */
+const onPhone = window.matchMedia('(max-width: 47.9em)').matches;
+
 export const toaster = createToaster({
-  placement: 'bottom',
-  pauseOnPageIdle: true,
+  placement: onPhone ? 'top' : 'bottom',
   offsets: { bottom: '5.5rem', top: '1rem', left: '1rem', right: '1rem' },
 });
 
-/** The messages that come up at the foot of the page. */
+/** The messages that tell what was done or did not work. */
 export default function Toasts() {
   return (
     <MoreParts>
