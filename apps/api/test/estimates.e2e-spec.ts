@@ -40,7 +40,7 @@ const idle = () => booted.app.get(QueueService).idle();
 it('is made on the spot where there is none yet, and says so', async () => {
   const estimate = await estimateOf();
   expect(estimate).toMatchObject({ chainId: chain.id, dryness: 'fresh', shareUsed: 0, totalKm: 0 });
-  expect(estimate.replacement.p10! <= estimate.replacement.p50!).toBe(true);
+  expect(estimate.replacement.p10! <= (estimate.replacement.p50 ?? '9999-12-31')).toBe(true);
   expect(estimate.reasons).toMatchObject([{ code: 'first-estimate' }]);
   expect(estimate).not.toHaveProperty('weekly');
 });
@@ -130,4 +130,23 @@ it('is nobody else’s to see', async () => {
     for (const what of ['estimate', 'estimates', 'usage'])
       await who.get(`/api/chains/${chain.id}/${what}`).expect(404);
   }
+});
+
+it('learns at the end of the night from how chains were found, and keeps it', async () => {
+  await newRide(browser, bike.id, { distanceM: 150_000, day: daysAgo(3) });
+  await mechanic
+    .post('/api/treatments')
+    .send({ chainId: chain.id, day: daysAgo(2), kind: 're-wax', arrival: 'dry' })
+    .expect(201);
+  await ownerQuery(booted, 'update workshop set fleet_model = null where id = $1', [workshopId]);
+  await booted.app.get(EstimatesTasks).estimateWorkshop({ workshopId });
+  await idle();
+  const [{ median, version }] = await ownerQuery<[{ median: string; version: string }]>(
+    booted,
+    `select fleet_model #>> '{life,kinds,strip-wax,median}' as median, fleet_model ->> 'version' as version
+       from workshop where id = $1`,
+    [workshopId],
+  );
+  expect(version).toMatch(/^learned-\d{4}-\d{2}-\d{2}$/);
+  expect(Number(median)).toBeLessThan(350);
 });
