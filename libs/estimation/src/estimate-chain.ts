@@ -9,11 +9,11 @@ import type { DueState } from './due/state';
 import { elongationCurve } from './elongation/curve';
 import { doubtedReadings } from './elongation/doubted';
 import { narrowing } from './elongation/narrowing';
-import type { PlacedReading } from './elongation/model';
 import { elongationPosterior } from './elongation/posterior';
 import { lifeQuantile, riderLife } from './life/rider-life';
 import { currentTreatment, lifeObservations } from './life/treatments';
 import { sparseQuantile } from './math/sparse-quantile';
+import { placedReadings } from './placed';
 import { forecastRiding } from './riding';
 import type { ChainEstimate, ChainHistory, FleetModel } from './types';
 import { chainUsage } from './usage';
@@ -37,7 +37,7 @@ export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEs
   const lubrication = history.fitted ? lubricationWindow(running, today, forecast) : null;
 
   const prior = fleet.elongation.rate[regime][bikeKind];
-  const readings = placed(history, usage.wearKmAt);
+  const readings = placedReadings(history, usage);
   const posterior = elongationPosterior(readings, prior);
   const left = sparseQuantile((p) => posterior.wearKmLeft(usage.wearKm, limitPct, p));
   const kmPerWearKm = 1 / (perKm.wear * Math.max(history.shareOfRiding, LEAST_SHARE));
@@ -95,11 +95,4 @@ export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEs
     alerts: chainAlerts(history, state),
     narrows: narrowing(posterior, usage.wearKm, limitPct, ['three-point']),
   };
-}
-
-/** Readings taken by today, each with the chain's wear km then. */
-function placed({ readings, today }: ChainHistory, wearKmAt: (day: number) => number): PlacedReading[] {
-  return readings
-    .filter(({ day }) => day <= today)
-    .map((reading) => ({ ...reading, wearKm: reading.baseline ? 0 : wearKmAt(reading.day) }));
 }

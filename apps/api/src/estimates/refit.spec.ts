@@ -1,5 +1,5 @@
 import { defaultFleetModel } from '@halfpitch/estimation';
-import type { LifeObservation } from '@halfpitch/estimation';
+import type { ChainLesson, LifeObservation } from '@halfpitch/estimation';
 import { refit, refitIsDue } from './refit';
 
 const dry: LifeObservation = { kind: 're-wax', lubeKm: 160, arrival: 'dry' };
@@ -13,9 +13,12 @@ it('is due where nothing was learned yet, and a week after', () => {
 });
 
 it('learns a shorter life from chains that came in dry, and is the same when done again', () => {
+  const chain = (...lives: LifeObservation[]): ChainLesson[] => [
+    { regime: 'immersion-wax', bikeKind: 'road', lives, readings: [] },
+  ];
   const lives = new Map([
-    ['a', [dry, dry]],
-    ['b', [dry]],
+    ['a', chain(dry, dry)],
+    ['b', chain(dry)],
   ]);
   const learned = refit(null, lives, '2026-12-01');
   expect(learned.version).toBe('learned-2026-12-01');

@@ -1,6 +1,6 @@
 import { Injectable, Logger, OnModuleInit } from '@nestjs/common';
-import { livesSeen } from '@halfpitch/estimation';
-import type { Factors, LifeObservation } from '@halfpitch/estimation';
+import { chainLesson } from '@halfpitch/estimation';
+import type { ChainLesson, Factors } from '@halfpitch/estimation';
 import { setImmediate } from 'node:timers/promises';
 import { Clock } from '../common/clock';
 import { TenantDb } from '../database/tenant-db';
@@ -13,7 +13,7 @@ import { refit } from './refit';
 const BATCH = 50;
 const FIRST = '00000000-0000-0000-0000-000000000000';
 
-/** Learns from everything the workshop has seen on arrival, and keeps what it learned. */
+/** Learns from what the workshop saw on arrival and measured, and keeps what it learned. */
 @Injectable()
 export class RefitTasks implements OnModuleInit {
   private readonly logger = new Logger(RefitTasks.name);
@@ -33,7 +33,7 @@ export class RefitTasks implements OnModuleInit {
   async refitWorkshop({ workshopId }: Tasks['refit-workshop']): Promise<void> {
     const workshop = await this.db.run({ workshopId }, () => this.workshops.current(workshopId));
     const today = this.clock.today(workshop.timeZone);
-    const lives = new Map<string, LifeObservation[]>();
+    const lessons = new Map<string, ChainLesson[]>();
     let chains: { id: string; riderId: string }[] = [];
     do {
       const after = chains.at(-1)?.id ?? FIRST;
@@ -43,13 +43,16 @@ export class RefitTasks implements OnModuleInit {
         const loaded = await this.histories.load([...riderOf.keys()], today, workshop.settings);
         for (const chain of loaded) {
           const rider = riderOf.get(chain.row.id)!;
-          lives.set(rider, [...(lives.get(rider) ?? []), ...this.seen(chain, workshop.settings.factors)]);
+          lessons.set(rider, [
+            ...(lessons.get(rider) ?? []),
+            ...this.lesson(chain, workshop.settings.factors),
+          ]);
           await setImmediate();
         }
         return next;
       });
     } while (chains.length === BATCH);
-    const model = refit(workshop.fleetModel, lives, today);
+    const model = refit(workshop.fleetModel, lessons, today);
     await this.db.run({ workshopId }, () =>
       this.db.manager.query('update workshop set fleet_model = $2 where id = $1', [
         workshopId,
@@ -59,9 +62,9 @@ export class RefitTasks implements OnModuleInit {
   }
 
   /** A chain whose record cannot be teaches nothing. */
-  private seen({ row, history }: LoadedChain, factors: Factors): LifeObservation[] {
+  private lesson({ row, history }: LoadedChain, factors: Factors): ChainLesson[] {
     try {
-      return livesSeen(history, factors);
+      return [chainLesson(history, factors)];
     } catch (error) {
       this.logger.warn(`Chain ${row.id} taught nothing: ${(error as Error).message}`);
       return [];

@@ -1,5 +1,5 @@
-import { dayOf, defaultFleetModel, fitLife } from '@halfpitch/estimation';
-import type { FleetModel, LifeObservation } from '@halfpitch/estimation';
+import { dayOf, defaultFleetModel, fitElongationPriors, fitLife } from '@halfpitch/estimation';
+import type { ChainLesson, FleetModel } from '@halfpitch/estimation';
 
 const DAYS_BETWEEN = 7;
 const VERSION = /^learned-(\d{4}-\d{2}-\d{2})$/;
@@ -10,7 +10,7 @@ export function refitIsDue(model: FleetModel | null, today: string): boolean {
   return learnedOn === undefined || dayOf(today) - dayOf(learnedOn) >= DAYS_BETWEEN;
 }
 
-/** More riders teach no more, and the sum would hold up the process that makes it. */
+/** More riders teach no more, and the sums would hold up the process that makes them. */
 const MOST_RIDERS = 300;
 
 /** At most so many riders, evenly over all of them. */
@@ -19,16 +19,22 @@ function someOf<T>(riders: readonly T[]): T[] {
   return riders.filter((_, i) => Math.floor(i / step) !== Math.floor((i - 1) / step));
 }
 
-/** What a workshop's observations teach, beginning each time from what every workshop starts from. */
+/** What each rider's chains teach, beginning each time from what every workshop starts from. */
 export function refit(
   model: FleetModel | null,
-  lives: ReadonlyMap<string, readonly LifeObservation[]>,
+  lessons: ReadonlyMap<string, readonly ChainLesson[]>,
   today: string,
 ): FleetModel {
   const start = defaultFleetModel();
+  const riders = someOf([...lessons.values()]);
+  const measured = riders.flat().filter(({ readings }) => readings.length > 0);
   return {
     ...(model ?? start),
     version: `learned-${today}`,
-    life: fitLife(someOf([...lives.values()]), start.life),
+    life: fitLife(
+      riders.map((chains) => chains.flatMap(({ lives }) => lives)),
+      start.life,
+    ),
+    elongation: fitElongationPriors(measured, start.elongation),
   };
 }
