@@ -13,68 +13,76 @@ export interface Atom {
 }
 
 const WRONG_SHARE = 0.03;
-const RUN_IN = { log: Math.log(0.025), sd: 0.65 };
+const RUN_IN = { log: Math.log(0.025), sd: 0.5 };
 
-interface Size {
-  rates: number;
-  runIns: number;
-  offsets: number;
+const RUN_INS = 36;
+const OFFSETS = 45;
+/** Rates looked at first, six prior sd either way, and rates about that many of which then share the heavy part. */
+const LOOK = { rates: 160, runIns: 5 };
+const FINE_RATES = 120;
+
+/** Log rates from low to high that one point stands for. */
+interface Cell {
+  low: number;
+  high: number;
 }
-const LOOK: Size = { rates: 160, runIns: 5, offsets: 25 };
-const FINE: Size = { rates: 120, runIns: 20, offsets: 45 };
 
 /**
- * The posterior as the plainest thing that can be right: for every rate and run-in of an even grid, every gauge's offset
- * is summed over, every reading's chance being computed anew. Shares with the product only the numbers of the model.
+ * The posterior as the plainest thing that can be right: for rates and run-ins by the thousand every gauge's offset is
+ * summed over, every reading's chance being computed anew. Shares with the product only the numbers of the model.
  */
 export function bruteForce(chain: GeneratedChain): Atom[] {
   const { median, logSd } = chain.prior;
   const wide = { low: Math.log(median) - 6 * logSd, high: Math.log(median) + 6 * logSd };
-  const look = atoms(chain, wide, LOOK);
-  const top = Math.max(...look.map(({ weight }) => weight));
-  const kept = look.filter(({ weight }) => weight > 1e-8 * top).map(({ rate }) => Math.log(rate));
-  const step = (wide.high - wide.low) / LOOK.rates;
-  return atoms(chain, { low: Math.min(...kept) - step, high: Math.max(...kept) + step }, FINE);
+  const cells = divide(wide, LOOK.rates);
+  const heights = cells.map((cell) =>
+    Math.max(...atoms(chain, [cell], LOOK.runIns).map(({ weight }) => weight)),
+  );
+  const top = Math.max(...heights);
+  const heavy = heights.filter((height) => height > 1e-4 * top).length;
+  const fine = cells.flatMap((cell, i) => {
+    if (heights[i]! > 1e-4 * top) return divide(cell, Math.ceil(FINE_RATES / heavy));
+    return heights[i]! > 1e-9 * top ? [cell] : [];
+  });
+  return atoms(chain, fine, RUN_INS);
 }
+
+const divide = ({ low, high }: Cell, n: number): Cell[] =>
+  Array.from({ length: n }, (_, i) => ({
+    low: low + (i * (high - low)) / n,
+    high: low + ((i + 1) * (high - low)) / n,
+  }));
 
 /** Midpoints of an even division. */
 const midpoints = (low: number, high: number, n: number): number[] =>
   Array.from({ length: n }, (_, i) => low + ((i + 0.5) * (high - low)) / n);
 
-function atoms(
-  { prior, readings }: GeneratedChain,
-  range: { low: number; high: number },
-  size: Size,
-): Atom[] {
+function atoms({ prior, readings }: GeneratedChain, cells: readonly Cell[], runIns: number): Atom[] {
   const gauges = new Map<string, PlacedReading[]>();
   for (const reading of readings) {
     const key = `${reading.method} ${reading.gauge}`;
     gauges.set(key, [...(gauges.get(key) ?? []), reading]);
   }
   const result: Atom[] = [];
-  const halfStep = Math.exp((range.high - range.low) / size.rates / 2);
-  for (const logRunIn of midpoints(RUN_IN.log - 4 * RUN_IN.sd, RUN_IN.log + 4 * RUN_IN.sd, size.runIns)) {
-    for (const logRate of midpoints(range.low, range.high, size.rates)) {
+  for (const logRunIn of midpoints(RUN_IN.log - 5 * RUN_IN.sd, RUN_IN.log + 5 * RUN_IN.sd, runIns)) {
+    for (const { low, high } of cells) {
+      const logRate = (low + high) / 2;
       const [rate, runIn] = [Math.exp(logRate), Math.exp(logRunIn)];
       let weight =
+        (high - low) *
         jStat.normal.pdf(logRate, Math.log(prior.median), prior.logSd) *
         jStat.normal.pdf(logRunIn, RUN_IN.log, RUN_IN.sd);
-      for (const group of gauges.values()) weight *= overOffsets(group, rate, runIn, size.offsets);
-      result.push({ rate, runIn, weight, halfStep });
+      for (const group of gauges.values()) weight *= overOffsets(group, rate, runIn);
+      result.push({ rate, runIn, weight, halfStep: Math.exp((high - low) / 2) });
     }
   }
   return result;
 }
 
-function overOffsets(
-  readings: readonly PlacedReading[],
-  rate: number,
-  runIn: number,
-  offsets: number,
-): number {
+function overOffsets(readings: readonly PlacedReading[], rate: number, runIn: number): number {
   const { offset, offsetSd } = methodErrors[readings[0]!.method];
   let sum = 0;
-  for (const z of midpoints(-4.5, 4.5, offsets)) {
+  for (const z of midpoints(-4.5, 4.5, OFFSETS)) {
     let product = jStat.normal.pdf(z, 0, 1);
     for (const reading of readings) {
       const truth = reading.baseline ? 0 : runIn + (rate * reading.wearKm) / 1000;

@@ -21,7 +21,7 @@ export function generateChain(seed: number): GeneratedChain {
   const draw = drawFrom(seed + 1);
   const prior = { median: draw.oneOf([0.04, 0.08, 0.12]), logSd: draw.oneOf([0.3, 0.5, 0.7]) };
   const rate = prior.median * Math.exp(draw.normal(0, prior.logSd));
-  const runIn = 0.025 * Math.exp(draw.normal(0, 0.65));
+  const runIn = 0.025 * Math.exp(draw.normal(0, 0.5));
   const limitPct = draw.oneOf(STEPS);
   const wearKm = draw.uniform(0.1, 1.2) * ((1000 * limitPct) / rate);
   const gauges = Array.from({ length: draw.whole(1, 3) }, (_, g) => gaugeOf(draw, `gauge ${g}`));

@@ -17,6 +17,10 @@ function main(): void {
   );
   const past = Math.max(...results.map(({ chancePast }) => chancePast));
   console.log(`chance of being past the limit: differs by ${past.toFixed(4)} at most`);
+  const inGaps = results.reduce((sum, result) => sum + result.inGaps, 0);
+  console.log(
+    `${inGaps} of ${9 * count} levels in an empty gap between two explanations: equal chance there instead`,
+  );
   const mean = (of: 'product' | 'reference') =>
     results.reduce((sum, { milliseconds }) => sum + milliseconds[of], 0) / count;
   console.log(

@@ -34,9 +34,9 @@ describe('fitElongationPriors', () => {
   });
 
   it('finds the median and the scatter of a large fleet', () => {
-    const { median, logSd, chains } = fitElongationPriors(fleet(300, 0.07, 0.3), start).rate['immersion-wax']
+    const { median, logSd, chains } = fitElongationPriors(fleet(150, 0.07, 0.3), start).rate['immersion-wax']
       .road;
-    expect(chains).toBe(300);
+    expect(chains).toBe(150);
     expect(Math.abs(Math.log(median / 0.07))).toBeLessThan(0.08);
     expect(logSd).toBeGreaterThan(0.25);
     expect(logSd).toBeLessThan(0.38);

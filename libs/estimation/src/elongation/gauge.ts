@@ -80,6 +80,6 @@ export function spreadOf(
 function exponentiate(logs: Float64Array): number {
   let top = -Infinity;
   for (let k = 0; k < logs.length; k++) if (logs[k]! > top) top = logs[k]!;
-  for (let k = 0; k < logs.length; k++) logs[k] = logs[k]! > top - 60 ? Math.exp(logs[k]! - top) : 0;
+  for (let k = 0; k < logs.length; k++) logs[k] = logs[k]! > top - 45 ? Math.exp(logs[k]! - top) : 0;
   return top;
 }

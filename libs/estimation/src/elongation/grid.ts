@@ -1,5 +1,6 @@
 import { fillRow, Gauge, spreadOf } from './gauge';
 import type { RatePrior, RunInPrior } from './priors';
+import { unsettled } from './settled';
 
 /** An even grid over an interval. */
 export interface Axis {
@@ -16,15 +17,18 @@ export interface Grid {
 }
 
 /** Prior sd of the log run-in that are looked at, either way. */
-export const RUN_IN_REACH = 3.5;
+export const RUN_IN_REACH = 4.5;
 const RATE_REACH = 6;
 /** A node this far below the top in the log carries nothing that shows. */
 const NEGLIGIBLE = 18;
-const FIRST = { rate: 61, runIn: 7 };
-const SEARCH = { rate: 25, runIn: 9 };
-const LAST = { rate: 49, runIn: 15 };
+const FIRST = { rate: 49, runIn: 9 };
+const SEARCH = { rate: 21, runIn: 7 };
+const LAST = { rate: 43, runIn: 15 };
+/** A search ends once the mass takes this many of its steps: the last grid then lies tight enough. */
+const RESOLVED = { rate: 12, runIn: 4 };
+const MOST_ROWS = 97;
 
-export const axis = (low: number, high: number, nodes: number): Axis => ({
+const axis = (low: number, high: number, nodes: number): Axis => ({
   low,
   step: (high - low) / (nodes - 1),
   nodes,
@@ -47,11 +51,29 @@ export function posteriorGrid(gauges: readonly Gauge[], rate: RatePrior, runIn: 
     evaluate(gauges, rate, runIn, axis(...rates, nodes.rate), axis(...runIns, nodes.runIn));
   for (let round = 0, nodes = FIRST; round < 6 && gauges.length > 0; round++, nodes = SEARCH) {
     const found = massOf(on(box, nodes));
-    const shrinks = Math.min(share(found.rate, box.rate), share(found.runIn, box.runIn));
+    const resolved =
+      share(found.rate, box.rate) * (nodes.rate - 1) >= RESOLVED.rate &&
+      share(found.runIn, box.runIn) * (nodes.runIn - 1) >= RESOLVED.runIn;
     box = found;
-    if (shrinks > 0.6) break;
+    if (resolved) break;
   }
-  return on(box, LAST);
+  return refined((nodes) => on(box, nodes), LAST);
+}
+
+/** Makes the last grid closer until its sums have settled. */
+function refined(on: (nodes: typeof FIRST) => Grid, start: typeof FIRST): Grid {
+  let nodes = start;
+  let grid = on(nodes);
+  for (let round = 0; round < 4; round++) {
+    const { rates, runIns } = unsettled(grid);
+    if (!rates && !runIns) break;
+    nodes = {
+      rate: rates ? 2 * nodes.rate - 1 : nodes.rate,
+      runIn: runIns ? Math.min(2 * nodes.runIn - 1, MOST_ROWS) : nodes.runIn,
+    };
+    grid = on(nodes);
+  }
+  return grid;
 }
 
 type Interval = readonly [low: number, high: number];
