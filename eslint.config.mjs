@@ -45,14 +45,30 @@ export default tseslint.config(
       eqeqeq: 'error',
       'max-lines': ['error', { max: 300 }],
     },
-    settings: { 'import-x/resolver-next': [createNodeResolver({ extensions: ['.ts', '.tsx', '.mjs', '.js'] })] },
+    settings: {
+      'import-x/resolver-next': [createNodeResolver({ extensions: ['.ts', '.tsx', '.mjs', '.js'] })],
+    },
   },
-  { files: ['**/*.tsx', 'apps/web/**/*.ts'], plugins: { 'react-hooks': reactHooks }, rules: reactHooks.configs.recommended.rules },
+  {
+    files: ['**/*.tsx', 'apps/web/**/*.ts'],
+    plugins: { 'react-hooks': reactHooks },
+    rules: reactHooks.configs.recommended.rules,
+  },
   {
     files: ['libs/estimation/**/*.ts', 'libs/contracts/**/*.ts', 'libs/ride-files/**/*.ts'],
-    rules: noImports('libraries know nobody: no Nest, TypeORM, React or other libs', '@nestjs/*', 'typeorm', 'react', '@halfpitch/*', '**/apps/**'),
+    rules: noImports(
+      'libraries know nobody: no Nest, TypeORM, React or other libs',
+      '@nestjs/*',
+      'typeorm',
+      'react',
+      '@halfpitch/*',
+      '**/apps/**',
+    ),
   },
-  { files: ['apps/web/**/*.{ts,tsx}'], rules: noImports('web never imports api', '**/api/src/**', '@nestjs/*', 'typeorm') },
+  {
+    files: ['apps/web/**/*.{ts,tsx}'],
+    rules: noImports('web never imports api', '**/api/src/**', '@nestjs/*', 'typeorm'),
+  },
   ...oneWay,
   { files: ['jest.config.js'], rules: { '@typescript-eslint/no-require-imports': 'off' } },
 );

@@ -1,7 +1,6 @@
-import { DynamicModule, Module } from '@nestjs/common';
+import { DynamicModule, Module, StandardSchemaSerializerInterceptor } from '@nestjs/common';
 import { ConfigModule } from '@nestjs/config';
 import { APP_FILTER, APP_GUARD, APP_INTERCEPTOR, APP_PIPE, Reflector } from '@nestjs/core';
-import { StandardSchemaSerializerInterceptor } from '@nestjs/common';
 import { ScheduleModule } from '@nestjs/schedule';
 import { AccountsModule } from './accounts/accounts.module';
 import { BikesModule } from './bikes/bikes.module';

@@ -19,7 +19,9 @@ export function rideLog(weeks: number): string {
 /** Gives the import page a file as a rider would, and waits for its outcome. */
 export async function importFile(page: Page, name: string, content: string, outcome: RegExp): Promise<void> {
   await page.goto('/import');
-  await page.locator('input[type=file]').setInputFiles({ name, mimeType: 'text/csv', buffer: Buffer.from(content) });
+  await page
+    .locator('input[type=file]')
+    .setInputFiles({ name, mimeType: 'text/csv', buffer: Buffer.from(content) });
   await expect(page.getByText(outcome)).toBeVisible({ timeout: 30_000 });
 }
 

@@ -16,12 +16,13 @@ interface Letter {
 
 const setting = (name: string): string => {
   const value = process.env[name];
-  if (!value) throw new Error(`${name} is missing: the stories are started by playwright with product.setup.ts.`);
+  if (!value)
+    throw new Error(`${name} is missing: the stories are started by playwright with product.setup.ts.`);
   return value;
 };
 
 export const test = base.extend({
-  baseURL: async ({}, use) => use(setting('STORY_BASE_URL')),
+  baseURL: async ({}, provide) => provide(setting('STORY_BASE_URL')),
 });
 
 /** The demo's sign-in of a role. */
@@ -30,7 +31,10 @@ export function signInOf(role: string): SignIn {
   return signIns.find((signIn) => signIn.role === role)!;
 }
 
-export async function signIn(page: Page, { email, password }: Pick<SignIn, 'email' | 'password'>): Promise<void> {
+export async function signIn(
+  page: Page,
+  { email, password }: Pick<SignIn, 'email' | 'password'>,
+): Promise<void> {
   await page.goto('/sign-in');
   await page.getByLabel('E-mail').fill(email);
   await page.getByLabel('Password', { exact: true }).fill(password);
@@ -43,7 +47,9 @@ export async function lettersTo(address: string): Promise<Letter[]> {
   const mailbox = setting('STORY_MAILBOX_URL');
   const list = await fetch(`${mailbox}/api/messages?to=${encodeURIComponent(address)}`);
   const { messages } = (await list.json()) as { messages: { id: string }[] };
-  return Promise.all(messages.map(async ({ id }) => (await (await fetch(`${mailbox}/api/messages/${id}`)).json()) as Letter));
+  return Promise.all(
+    messages.map(async ({ id }) => (await (await fetch(`${mailbox}/api/messages/${id}`)).json()) as Letter),
+  );
 }
 
 /** The newest letter to an address, once it has come. */
