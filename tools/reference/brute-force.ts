@@ -15,8 +15,8 @@ export interface Atom {
 const WRONG_SHARE = 0.03;
 const RUN_IN = { log: Math.log(0.025), sd: 0.5 };
 
-const RUN_INS = 36;
-const OFFSETS = 45;
+const RUN_INS = 26;
+const OFFSETS = 37;
 /** Rates looked at first, six prior sd either way, and rates about that many of which then share the heavy part. */
 const LOOK = { rates: 160, runIns: 5 };
 const FINE_RATES = 120;

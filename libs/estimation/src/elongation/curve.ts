@@ -4,7 +4,7 @@ import type { ElongationPosterior } from './posterior';
 
 const PAST_POINTS = 40;
 const AHEAD_POINTS = 30;
-const KNOTS = 9;
+const KNOTS = 7;
 /** The chart ends after two years at most. */
 const MOST_DAYS = 731;
 

@@ -21,7 +21,7 @@ export interface ElongationPosterior {
 }
 
 /** Rates are found to this share of themselves. */
-const TOLERANCE = 2e-5;
+const TOLERANCE = 5e-5;
 /** Rows with less mass are passed over. */
 const NOTHING = 1e-7;
 

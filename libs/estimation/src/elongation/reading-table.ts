@@ -1,10 +1,10 @@
 import { ElongationModel, PlacedReading } from './model';
 import { readingChances, worstPlace } from './reading-likelihood';
 
-/** Steps of a table per standard deviation of the noise: linear reading between them errs by 1/512 at most in the log. */
-const STEPS_PER_SD = 8;
+/** Steps of a table per standard deviation of the noise: linear reading between them errs by 1/392 at most in the log. */
+const STEPS_PER_SD = 7;
 /** Beyond this many standard deviations a sound reading is out of the question: the table is flat from there on. */
-const REACH = 9;
+const REACH = 6;
 
 /** Log-likelihood of one reading, tabulated over what its gauge would show without noise. */
 export interface ReadingTable {
