@@ -16,14 +16,15 @@ function main(): void {
   if (!values.logs || (!values.out && !values['write-defaults'])) throw new Error(`Usage: ${USAGE}`);
   const riders = readLogs(values.logs);
   if (values['write-defaults']) {
-    writeFileSync(DEFAULTS, `${JSON.stringify(fitRidingModel(riders))}\n`);
+    writeFileSync(DEFAULTS, `${JSON.stringify(fitRidingModel(riders, null))}\n`);
     console.log(
       `Wrote the defaults learned from ${riders.length} riders (${readFileSync(DEFAULTS).length} bytes).`,
     );
     return;
   }
   const lines = riders.flatMap((rider) => {
-    const forecasts = backtestRider(rider, fitRidingModel(riders.filter((other) => other !== rider)));
+    const others = riders.filter((other) => other !== rider);
+    const forecasts = backtestRider(rider, fitRidingModel(others, null));
     console.error(`${rider.rider}: ${forecasts.length} forecasts`);
     return forecasts.map((forecast) => JSON.stringify(forecast));
   });

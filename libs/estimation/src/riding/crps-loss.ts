@@ -8,21 +8,22 @@ export interface Lesson {
   weight: number;
 }
 
-export interface Penalties {
-  location: number;
-  scale: number;
+/** Ridge: each coefficient is drawn to its centre with its own strength. */
+export interface Ridge {
+  centre: Float64Array;
+  strength: Float64Array;
 }
 
 export const MAX_LOG_DAYS = 9;
 
 /**
- * Mean pinball loss over LEVELS (half the CRPS), in days capped at each lesson's horizon, plus ridge penalties; x holds
+ * Mean pinball loss over LEVELS (half the CRPS), in days capped at each lesson's horizon, plus the ridge; x holds
  * the location's coefficients, the scale's without its intercept, and z.
  */
 export function crpsObjective(
   lessons: readonly Lesson[],
   scaleSize: number,
-  penalties: Penalties,
+  { centre, strength }: Ridge,
 ): Objective {
   const size = lessons[0]!.row.length;
   const total = lessons.reduce((sum, { weight, days }) => sum + weight * days, 0) * LEVELS.length;
@@ -55,10 +56,10 @@ export function crpsObjective(
     }
     for (let i = 0; i < gradient.length; i++) gradient[i]! /= total;
     let value = loss / total;
-    for (let i = 1; i < zAt; i++) {
-      const penalty = i < size ? penalties.location : penalties.scale;
-      value += (penalty * x[i]! ** 2) / 2;
-      gradient[i]! += penalty * x[i]!;
+    for (let i = 0; i < gradient.length; i++) {
+      const off = x[i]! - centre[i]!;
+      value += (strength[i]! * off ** 2) / 2;
+      gradient[i]! += strength[i]! * off;
     }
     return value;
   };
