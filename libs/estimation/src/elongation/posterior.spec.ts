@@ -1,4 +1,5 @@
 import * as fc from 'fast-check';
+import { ImpossibleInputError } from '../errors';
 import { doubtedReadings } from './doubted';
 import type { PlacedReading } from './model';
 import { narrowing } from './narrowing';
@@ -139,5 +140,15 @@ describe('elongationPosterior', () => {
     const posterior = elongationPosterior([reading('a', 4000, { values: [0.2] })], prior);
     const left = [4000, 4500, 6000, 9000].map((km) => posterior.wearKmLeft(km, 0.5, 0.5));
     expect([...left].sort((a, b) => b - a)).toEqual(left);
+  });
+
+  it.each([
+    ['an elongation of 40 %', { values: [40] }],
+    ['no number', { values: [NaN] }],
+    ['a reading that says nothing', {}],
+    ['above 0.75 and below 0.5 at once', { lower: 0.75, upper: 0.5 }],
+    ['wear km below nothing', { values: [0.1], wearKm: -1 }],
+  ])('refuses %s', (_, change) => {
+    expect(() => elongationPosterior([reading('a', 1000, change)], prior)).toThrow(ImpossibleInputError);
   });
 });

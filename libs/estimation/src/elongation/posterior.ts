@@ -1,5 +1,6 @@
 import { risingRoot } from '../math/solve';
 import type { Band } from '../types';
+import { checkReadings } from './check-readings';
 import { Conditionals, conditionals } from './conditional';
 import { Gauge, gaugeOf } from './gauge';
 import { Grid, posteriorGrid, RUN_IN_REACH } from './grid';
@@ -28,13 +29,14 @@ const NOTHING = 1e-7;
 /**
  * Posterior of e(x) = run-in + rate · x/1000 given readings by any method. A gauge's readings share its offset, which is
  * integrated out; each reading may be wrong with a small chance, so that one that contradicts the others weighs less.
- * Deterministic quadrature throughout.
+ * Deterministic quadrature throughout. @throws ImpossibleInputError
  */
 export function elongationPosterior(
   readings: readonly PlacedReading[],
   prior: RatePrior,
   model: ElongationModel = defaultElongationModel,
 ): ElongationPosterior {
+  checkReadings(readings, prior);
   const mostRunIn = model.runIn.median * Math.exp(RUN_IN_REACH * model.runIn.logSd);
   const gauges = byGauge(readings).map((group) => gaugeOf(group, model, mostRunIn));
   const grid = posteriorGrid(gauges, prior, model.runIn);
