@@ -7,7 +7,7 @@ const RIDER = `${NAME.toLowerCase().replace(' ', '.')}@tarnwick.example`;
 
 /** From the desk's invitation to the reminder in the rider's inbox, each person in a browser of their own. */
 test('a new rider, a re-wax, one reminder, and the owner sees it coming', async ({ browser, baseURL }) => {
-  test.setTimeout(240_000);
+  test.setTimeout(420_000);
   const open = async (width = 390, height = 844) =>
     (await browser.newContext({ baseURL, viewport: { width, height }, locale: 'en-GB' })).newPage();
 
@@ -60,7 +60,7 @@ test('a new rider, a re-wax, one reminder, and the owner sees it coming', async 
   await mechanic.getByRole('button', { name: 'Record the treatment' }).click();
   await expect(mechanic.getByText('Due again').first()).toBeVisible();
 
-  const reminders = async () => (await lettersTo(RIDER)).filter(({ subject }) => subject.includes('Ferry A'));
+  const reminders = async () => (await lettersTo(RIDER)).filter(({ subject }) => subject.includes('Ferry bike'));
   const before = (await reminders()).length;
   await laterBy(mechanic, 10);
   await rider.goto('/log');
