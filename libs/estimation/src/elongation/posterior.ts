@@ -44,13 +44,15 @@ export function elongationPosterior(
   const rate = (p: number) =>
     Math.exp(risingRoot((t) => chance(rows, () => t) - p, ...rows.range, TOLERANCE));
   const past = (totalKm: number, limitPct: number) =>
-    1 - chance(rows, (runIn) => logRateTo(limitPct - runIn, totalKm));
+    1 - chance(rows, (k) => logRateTo(limitPct - rows.runIns[k]!, totalKm));
+  let asked = roomTo(rows, NaN);
+  const room = (limitPct: number) => (asked.limitPct === limitPct ? asked : (asked = roomTo(rows, limitPct)));
   return {
     grid,
     gauges,
     rate: band(rate),
     elongationAt: (wearKm) => band((p) => elongation(rows, Math.max(wearKm, 0), p)),
-    wearKmLeft: (wearKm, limitPct, p) => kmAtLimit(rows, limitPct, p) - wearKm,
+    wearKmLeft: (wearKm, limitPct, p) => kmAtLimit(rows, room(limitPct), p) - wearKm,
     chancePast: past,
   };
 }
@@ -62,10 +64,9 @@ const logRateTo = (pct: number, km: number): number =>
   pct <= 0 ? -Infinity : km <= 0 ? Infinity : Math.log((1000 * pct) / km);
 
 /** Chance that the log rate is at most a bound that depends on the run-in. */
-function chance(rows: Conditionals, bound: (runIn: number) => number): number {
+function chance(rows: Conditionals, bound: (row: number) => number): number {
   let sum = 0;
-  for (let k = 0; k < rows.runIns.length; k++)
-    if (rows.mass[k]! > NOTHING) sum += rows.upTo(k, bound(rows.runIns[k]!));
+  for (let k = 0; k < rows.runIns.length; k++) if (rows.mass[k]! > NOTHING) sum += rows.upTo(k, bound(k));
   return sum;
 }
 
@@ -76,7 +77,10 @@ function elongation(rows: Conditionals, wearKm: number, p: number): number {
   const high = last + (Math.exp(rows.range[1]) * wearKm) / 1000;
   if (wearKm <= 0) return runInQuantile(rows, p);
   const logs = [Math.log(low), Math.log(high)] as const;
-  const upTo = (log: number) => chance(rows, (runIn) => logRateTo(Math.exp(log) - runIn, wearKm));
+  const upTo = (log: number) => {
+    const most = Math.exp(log);
+    return chance(rows, (k) => logRateTo(most - rows.runIns[k]!, wearKm));
+  };
   return Math.exp(risingRoot((log) => upTo(log) - p, ...logs, TOLERANCE));
 }
 
@@ -90,14 +94,24 @@ function runInQuantile({ runIns, mass }: Conditionals, p: number): number {
   return runIns[k]! * stride ** (share - 0.5);
 }
 
-/** Quantile of the wear km from new to the limit. */
-function kmAtLimit(rows: Conditionals, limitPct: number, p: number): number {
+/** What each run-in leaves up to a limit, as the log rate that takes it in one km, and the logs of km it can take. */
+interface Room {
+  limitPct: number;
+  logs: Float64Array;
+  low: number;
+  high: number;
+}
+
+function roomTo(rows: Conditionals, limitPct: number): Room {
   const [slowest, fastest] = rows.range;
-  const room = limitPct - rows.runIns[0]!;
-  if (room <= 0) return 0;
-  const low = Math.log(1000 * room) - fastest - 6;
-  const high = Math.log(1000 * room) - slowest;
-  const upTo = (log: number) => 1 - chance(rows, (runIn) => logRateTo(limitPct - runIn, Math.exp(log)));
-  if (upTo(low) >= p) return 0;
-  return Math.exp(risingRoot((log) => upTo(log) - p, low, high, TOLERANCE));
+  const logs = rows.runIns.map((runIn) => logRateTo(limitPct - runIn, 1));
+  const heavy = logs.filter((log, k) => rows.mass[k]! > NOTHING && log > -Infinity);
+  return { limitPct, logs, low: Math.min(...heavy) - fastest, high: Math.max(...heavy) - slowest };
+}
+
+/** Quantile of the wear km from new to the limit; 0 where the run-in alone takes it there. */
+function kmAtLimit(rows: Conditionals, { logs, low, high }: Room, p: number): number {
+  const above = (log: number) => 1 - chance(rows, (k) => logs[k]! - log) - p;
+  if (!(low < high) || above(low) >= 0) return 0;
+  return Math.exp(risingRoot(above, low, high, TOLERANCE));
 }
