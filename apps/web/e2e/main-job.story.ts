@@ -60,7 +60,8 @@ test('a new rider, a re-wax, one reminder, and the owner sees it coming', async 
   await mechanic.getByRole('button', { name: 'Record the treatment' }).click();
   await expect(mechanic.getByText('Due again').first()).toBeVisible();
 
-  const reminders = async () => (await lettersTo(RIDER)).filter(({ subject }) => subject.includes('Ferry bike'));
+  const reminders = async () =>
+    (await lettersTo(RIDER)).filter(({ subject }) => subject.includes('Ferry bike'));
   const before = (await reminders()).length;
   await laterBy(mechanic, 10);
   await rider.goto('/log');
