@@ -1,4 +1,3 @@
-import AxeBuilder from '@axe-core/playwright';
 import { expect, type Page, test as base } from '@playwright/test';
 
 interface SignIn {
@@ -62,13 +61,6 @@ export async function letterTo(address: string): Promise<Letter> {
 export async function laterBy(page: Page, days: number): Promise<void> {
   const answer = await page.request.post('/api/test/clock', { data: { days }, timeout: 100_000 });
   expect(answer.ok()).toBe(true);
-}
-
-/** No violation of WCAG 2.2 AA that a machine can find. */
-export async function expectAccessible(page: Page): Promise<void> {
-  const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
-  const { violations } = await new AxeBuilder({ page }).withTags(tags).analyze();
-  expect(violations.map(({ id, nodes }) => `${id}: ${nodes[0]?.html}`)).toEqual([]);
 }
 
 export { expect };
