@@ -15,7 +15,6 @@ import { DatabaseModule } from './database/database.module';
 import { EstimatesModule } from './estimates/estimates.module';
 import { RemindersModule } from './reminders/reminders.module';
 import { TestHooksModule } from './test-hooks/test-hooks.module';
-import { webPages } from './web-pages';
 import { WorkloadModule } from './workload/workload.module';
 import { HealthModule } from './health/health.module';
 import { JobsModule } from './jobs/jobs.module';
@@ -67,7 +66,6 @@ export class AppModule {
       skipProcessEnv: true,
       load: [() => environment],
     });
-    const imports = [config, webPages(environment)];
-    return { module: AppModule, imports: environment.TEST_HOOKS ? [...imports, TestHooksModule] : imports };
+    return { module: AppModule, imports: environment.TEST_HOOKS ? [config, TestHooksModule] : [config] };
   }
 }

@@ -9,6 +9,7 @@ import { sameOrigin } from './common/same-origin';
 import { Environment } from './config/environment';
 import { SessionPool } from './database/session-pool';
 import { mountDocs } from './docs';
+import { servePages } from './web-pages';
 
 const THIRTY_DAYS_MS = 30 * 86_400_000;
 
@@ -54,5 +55,6 @@ export function configure(app: NestExpressApplication): void {
     passport.session(),
   );
   mountDocs(app);
+  servePages(app, config.get<string>('WEB_ROOT'));
   app.getHttpServer().on('close', () => store.close());
 }

@@ -1,20 +1,26 @@
 import { resolve, sep } from 'node:path';
-import type { DynamicModule } from '@nestjs/common';
-import { ServeStaticModule } from '@nestjs/serve-static';
-import type { Response } from 'express';
-import type { Environment } from './config/environment';
+import type { NestExpressApplication } from '@nestjs/platform-express';
+import express, { type NextFunction, type Request, type Response } from 'express';
 
 const A_YEAR = 'public, max-age=31536000, immutable';
 
-/** The built web pages. Every address that is not the API's answers the one page, which finds its own way. */
-export function webPages({ WEB_ROOT }: Pick<Environment, 'WEB_ROOT'>): DynamicModule {
-  return ServeStaticModule.forRoot({
-    rootPath: resolve(WEB_ROOT),
-    exclude: ['/api/{*rest}'],
-    serveStaticOptions: {
+/**
+ * The built web pages in a folder. Every address that is not the API's answers the one page, which finds its own way.
+ * The page is sent by its name under the folder: by a whole path it would not be found below a folder like `.build`.
+ */
+export function servePages(app: NestExpressApplication, folder: string): void {
+  const root = resolve(folder);
+  app.use(
+    express.static(root, {
       // Files under assets carry a hash of their content in their names; the page itself is asked for each time.
-      setHeaders: (response: Response, path: string) =>
+      setHeaders: (response, path) =>
         response.setHeader('Cache-Control', path.includes(`${sep}assets${sep}`) ? A_YEAR : 'no-cache'),
-    },
+    }),
+  );
+  app.use((request: Request, response: Response, next: NextFunction) => {
+    const isPage = ['GET', 'HEAD'].includes(request.method) && !/^\/(api|assets)(\/|$)/.test(request.path);
+    if (!isPage) return next();
+    response.setHeader('Cache-Control', 'no-cache');
+    response.sendFile('index.html', { root }, (error) => error && next());
   });
 }

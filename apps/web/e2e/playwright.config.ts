@@ -12,6 +12,8 @@ export default defineConfig({
   workers: 1,
   reporter: [['list']],
   use: {
+    actionTimeout: 20_000,
+    navigationTimeout: 30_000,
     viewport: { width: 390, height: 844 },
     locale: 'en-GB',
     timezoneId: 'Europe/Berlin',
