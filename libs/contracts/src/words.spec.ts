@@ -19,6 +19,7 @@ describe('windowWords', () => {
       'likely between now and 5 March, most likely now',
     );
     expect(words('2026-02-01', '2026-02-10', '2026-03-01')).toBe('due now');
+    expect(words('2026-03-13', '2026-03-13', '2026-03-13')).toBe('most likely 13 March');
     expect(words('2026-09-01', null, null)).toBe('from 1 September on');
     expect(words(null, null, null)).toBe('not within the next two years');
   });

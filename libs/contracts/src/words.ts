@@ -25,6 +25,7 @@ export function windowWords(
   if (p10 === null) return 'not within the next two years';
   if (p90 !== null && p90 <= today) return 'due now';
   const from = p10 <= today ? today : p10;
+  if (from === p90) return `most likely ${dayWords(p90, today)}`;
   const median =
     p50 === null ? '' : p50 <= today ? ', most likely now' : `, most likely ${dayWords(p50, today)}`;
   if (p90 === null) return `from ${dayWords(from, today)} on${median}`;

@@ -40,7 +40,9 @@ export function Shell() {
   const main = useFocusOnNewPage();
   return (
     <Box display={{ md: 'flex' }} minHeight="100dvh">
-      <SkipLink href="#main">Skip to the page</SkipLink>
+      <SkipLink href="#main" className="no-print">
+        Skip to the page
+      </SkipLink>
       <HStack as="header" hideFrom="md" justify="space-between" px="4" pt="3" className="no-print">
         <Brand />
         <Text color="fg.muted" textStyle="sm" truncate>

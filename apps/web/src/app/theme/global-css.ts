@@ -11,6 +11,8 @@ export const globalCss = defineGlobalStyles({
     scrollPaddingTop: '4rem',
     scrollPaddingBottom: { base: '6rem', md: '2rem' },
   },
+  // A field that is wrong is scrolled clear of the bar that saves, with the sentence below it.
+  'input, select, textarea': { scrollMarginBlock: '8rem' },
   'html.dark': { colorScheme: 'dark' },
   body: { fontFamily: 'body', fontSize: 'md', minHeight: '100dvh', textRendering: 'optimizeLegibility' },
   '*': { '--global-color-border': 'colors.border' },

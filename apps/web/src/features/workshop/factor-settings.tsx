@@ -1,4 +1,4 @@
-import { Grid, Heading, Stack, Text } from '@chakra-ui/react';
+import { Heading, SimpleGrid, Stack, Text } from '@chakra-ui/react';
 import { surfaces } from '@halfpitch/contracts';
 import { Fragment } from 'react';
 import { NumberField } from '../../components/fields/number-field';
@@ -18,22 +18,14 @@ function FactorRows({ title, rows }: { title: string; rows: Row[] }) {
       <Heading as="h3" size="md" mb="3">
         {title}
       </Heading>
-      <Grid
-        templateColumns={{ base: '1fr 1fr', md: '7rem 10rem 10rem' }}
-        columnGap="5"
-        rowGap="4"
-        alignItems="end"
-      >
+      <SimpleGrid columns={2} columnGap="5" rowGap="4" maxWidth="24rem">
         {rows.map(({ path, word }) => (
           <Fragment key={path}>
-            <Text gridColumn={{ base: '1 / -1', md: 'auto' }} fontWeight="semibold" pb={{ md: '2.5' }}>
-              {word}
-            </Text>
-            <NumberField name={`${path}.lube`} label="Treatment" unit="×" />
-            <NumberField name={`${path}.wear`} label="Wear" unit="×" />
+            <NumberField name={`${path}.lube`} label={`${word}: treatment`} unit="×" />
+            <NumberField name={`${path}.wear`} label={`${word}: wear`} unit="×" />
           </Fragment>
         ))}
-      </Grid>
+      </SimpleGrid>
     </div>
   );
 }
