@@ -25,6 +25,8 @@ export const chain = chainInput.extend({
   id,
   riderId: id,
   riderName: z.string(),
+  /** Whether its rider takes reminders. */
+  remindersOn: z.boolean(),
   /** The bike it is on now; null in the box. */
   bikeId: id.nullable(),
   bikeName: z.string().nullable(),

@@ -3,7 +3,8 @@ import { defaultWearLimitPct } from '@halfpitch/estimation';
 
 /** A chain with its rider, the bike it is on and its newest estimate, from one statement. */
 export const CHAIN_COLUMNS = `
-  chain.id, chain.rider_id as "riderId", rider.name as "riderName", chain.label, chain.speeds, chain.regime,
+  chain.id, chain.rider_id as "riderId", rider.name as "riderName",
+  rider.reminders_on as "remindersOn", chain.label, chain.speeds, chain.regime,
   chain.wear_limit_pct as "wearLimitPct", chain.in_service_on::text as "inServiceOn",
   chain.retired_on::text as "retiredOn", chain.retired_because as "retiredBecause",
   bike.id as "bikeId", bike.name as "bikeName",
@@ -27,6 +28,7 @@ export interface ChainRow {
   id: string;
   riderId: string;
   riderName: string;
+  remindersOn: boolean;
   label: string;
   speeds: number;
   regime: Regime;

@@ -59,6 +59,17 @@ export const dueColumns = (find: Find): Column<DueRow>[] => [
   { head: 'Treatment', cell: ({ chain }) => chain.state && <StateWord dryness={chain.state.dryness} /> },
   { head: 'Due', cell: (row) => <WindowCell row={row} /> },
   { head: 'Within 14 days', numeric: true, cell: ({ window }) => chance(window.chanceWithin14) },
-  { head: 'Reminder', cell: (row) => <LastCell reminder={find(subjectOf(row))} /> },
-  { head: 'Do', cell: (row) => <ReminderActs subject={subjectOf(row)} reminder={find(subjectOf(row))} /> },
+  {
+    head: 'Reminder',
+    cell: (row) => (row.chain.remindersOn ? <LastCell reminder={find(subjectOf(row))} /> : 'Letters stopped'),
+  },
+  {
+    head: 'Do',
+    cell: (row) =>
+      row.chain.remindersOn ? (
+        <ReminderActs subject={subjectOf(row)} reminder={find(subjectOf(row))} />
+      ) : (
+        <Text color="fg.muted">Telephone instead</Text>
+      ),
+  },
 ];

@@ -13,14 +13,15 @@ import { newestBySubject } from '../reminders/reminder-words';
 import { dueColumns } from './due-columns';
 import { dueRows } from './due-rows';
 
-/** The newest letters, and all that are held however old: what a chain's row needs to know. */
+/** The newest letters, and all that are held however old: what a chain's row needs to know; until it does, the query it waits for. */
 function useReminderOf() {
   const newest = useQuery({ ...remindersQuery({ size: 200 }), refetchInterval: 20_000 });
   const held = useQuery(remindersQuery({ state: 'held', size: 200 }));
-  return useMemo(
-    () => newestBySubject([...(newest.data?.items ?? []), ...(held.data?.items ?? [])]),
+  const reminderOf = useMemo(
+    () => newest.data && held.data && newestBySubject([...newest.data.items, ...held.data.items]),
     [newest.data, held.data],
   );
+  return { reminderOf, waitsFor: newest.data ? held : newest };
 }
 
 /** Who is due soonest, what was written to them, and the way to write or hold. */
@@ -28,8 +29,8 @@ export function Due() {
   const [search] = useUrlState('search');
   const [page, onPage] = usePageNumber();
   const query = useQuery(chainsQuery({ order: 'soonest', search, page, size: 25 }));
-  const reminderOf = useReminderOf();
-  const columns = useMemo(() => dueColumns(reminderOf), [reminderOf]);
+  const { reminderOf, waitsFor } = useReminderOf();
+  const columns = useMemo(() => reminderOf && dueColumns(reminderOf), [reminderOf]);
   return (
     <>
       <PageHeader
@@ -46,7 +47,7 @@ export function Due() {
                   ? 'Try a part of the rider’s name, the bike or the chain.'
                   : 'Add a rider, a bike and its chain.'}
               </EmptyState>
-            ) : (
+            ) : columns ? (
               <DataTable
                 caption="Chains by the day they fall due"
                 columns={columns}
@@ -54,6 +55,10 @@ export function Due() {
                 rowKey={({ key }) => key}
                 paging={{ ...data, onPage }}
               />
+            ) : (
+              <Loaded query={waitsFor} rows={8} height="4rem">
+                {() => null}
+              </Loaded>
             )
           }
         </Loaded>
