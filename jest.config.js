@@ -40,6 +40,8 @@ module.exports = {
   testEnvironment: 'node',
   // Booting the program with a database of its own takes seconds on a busy machine.
   testTimeout: 60_000,
+  // By itself jest leaves one core idle.
+  maxWorkers: '100%',
   moduleNameMapper: { '^@halfpitch/([^/]+)$': '<rootDir>/libs/$1/src/index.ts' },
   transform: { '\\.tsx?$': swc(false), '\\.m?js$': swc(true) },
   transformIgnorePatterns: [`/node_modules/(?!(?:${esModulePackages.join('|')})/)`],
