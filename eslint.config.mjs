@@ -20,6 +20,7 @@ const features = [
   'estimates',
   'reminders',
   'workload',
+  'accuracy',
 ];
 
 const oneWay = features.slice(0, -1).map((feature, i) => ({

@@ -2,6 +2,7 @@ import { DynamicModule, Module, StandardSchemaSerializerInterceptor } from '@nes
 import { ConfigModule } from '@nestjs/config';
 import { APP_FILTER, APP_GUARD, APP_INTERCEPTOR, APP_PIPE, Reflector } from '@nestjs/core';
 import { ScheduleModule } from '@nestjs/schedule';
+import { AccuracyModule } from './accuracy/accuracy.module';
 import { AccountsModule } from './accounts/accounts.module';
 import { BikesModule } from './bikes/bikes.module';
 import { ChainsModule } from './chains/chains.module';
@@ -44,6 +45,7 @@ import { WorkshopModule } from './workshop/workshop.module';
     EstimatesModule,
     RemindersModule,
     WorkloadModule,
+    AccuracyModule,
   ],
   providers: [
     { provide: APP_FILTER, useClass: ProblemFilter },

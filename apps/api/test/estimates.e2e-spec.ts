@@ -1,4 +1,12 @@
-import type { Bike, Chain, ChainEstimate, PastEstimate, Rider, Usage } from '@halfpitch/contracts';
+import type {
+  Bike,
+  Chain,
+  ChainEstimate,
+  PastEstimate,
+  Rider,
+  Usage,
+  WorkshopSettings,
+} from '@halfpitch/contracts';
 import { EstimatesTasks } from '../src/estimates/estimates.tasks';
 import { QueueService } from '../src/jobs/queue.service';
 import { BootedApp, bootApp, invited, ownerOfNewWorkshop } from './support/app';
@@ -149,4 +157,22 @@ it('learns at the end of the night from how chains were found, and keeps it', as
   );
   expect(version).toMatch(/^learned-\d{4}-\d{2}-\d{2}$/);
   expect(Number(median)).toBeLessThan(350);
+});
+
+it('is made anew for every chain when the owner changes what a kilometre counts for', async () => {
+  await newRide(browser, bike.id, { distanceM: 100_000, weather: 'wet' });
+  await idle();
+  expect((await estimateOf()).treatment.lubeKmUsed).toBe(200);
+  const settings = (await owner.get('/api/workshop').expect(200)).body as WorkshopSettings;
+  const { factors } = settings;
+  const weather = { ...factors.weather, wet: { lube: 2.5, wear: 2 } };
+  await owner
+    .put('/api/workshop')
+    .send({ ...settings, factors: { ...factors, weather } })
+    .expect(200);
+  await idle();
+  expect((await estimateOf()).treatment.lubeKmUsed).toBe(250);
+  await owner.put('/api/workshop').send(settings).expect(200);
+  await idle();
+  expect((await estimateOf()).treatment.lubeKmUsed).toBe(200);
 });

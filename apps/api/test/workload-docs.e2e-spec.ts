@@ -32,15 +32,18 @@ describe('GET /api/workload', () => {
     const chain = await newChain(owner, bike);
     await newRide(owner, bike.id, { distanceM: 1_500_000, day: daysAgo(90) });
     await booted.app.get(QueueService).idle();
-    const { weeks } = await workloadOf(owner);
+    const { weeks, coming } = await workloadOf(owner);
     const mine = weeks[0]!.chains.find(({ chainId, kind }) => chainId === chain.id && kind === 'lubrication');
     expect(mine).toMatchObject({ label: 'A', riderName: 'Rita Rider' });
     expect(mine!.chance).toBeGreaterThan(0.9);
     expect(weeks[0]).toMatchObject({
-      treatments: { p50: 1, p90: 1 },
-      benchMinutes: { p50: 25 },
-      potLoads: { p50: 1 },
+      treatments: { p90: 1 },
+      benchMinutes: { p90: 25 },
+      potLoads: { p90: 1 },
     });
+    // Nobody was written to yet: even odds that who is due comes within a week.
+    expect(coming).toEqual({ chancePerWeek: 0.5, reminders: 0, cameInThreeWeeks: 0 });
+    expect(weeks[0]!.treatments.mean).toBeCloseTo(mine!.chance / 2, 6);
   });
 
   it('is the owner’s, and of their workshop', async () => {

@@ -1,3 +1,4 @@
+export * from './accuracy';
 export * from './accounts';
 export * from './bikes';
 export * from './chains';

@@ -26,5 +26,13 @@ export const workload = z.object({
     }),
   ),
   minutesPerWeek: z.number(),
+  /** What past reminders teach about when riders come who are due. */
+  coming: z.object({
+    /** Chance that a rider who is due comes within a week. */
+    chancePerWeek: z.number(),
+    /** Reminders sent at least three weeks ago, and those followed by a treatment within three weeks. */
+    reminders: z.number().int(),
+    cameInThreeWeeks: z.number().int(),
+  }),
 });
 export type Workload = z.infer<typeof workload>;

@@ -8,7 +8,7 @@ import { loadScenario } from '../demo/load-scenario';
 import { PLACES } from '../demo/places';
 import { DEMO_SIZE, generateScenario } from '../demo/scenario';
 
-/** Estimates of the last quarter: few, since each one is really made while the demo loads. */
+/** Estimates of the last quarter beside those about treatments: few, since each one is really made while the demo loads. */
 const PAST_WEEKS = [12, 6, 1];
 
 const say = (line: string) => console.log(line);

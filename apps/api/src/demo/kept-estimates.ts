@@ -1,5 +1,6 @@
 import { dayOf, defaultFleetModel, estimateChain, PreviousEstimate } from '@halfpitch/estimation';
 import { plusDays } from '../common/calendar';
+import type { Chain } from '../chains/chain.entity';
 import type { Estimate } from '../estimates/estimate.entity';
 import { toDetail } from '../estimates/estimate-detail';
 import type { Workshop } from '../workshop/workshop.entity';
@@ -9,7 +10,31 @@ import type { Household } from './records';
 
 const dayOrNull = (day: string | null) => (day === null ? null : dayOf(day));
 
-/** What would have been said of each chain so many weeks ago, the oldest first, by the library itself, knowing only what was known then. */
+/** Looks of the last so many days are judged by the windows told before them. */
+const JUDGED_DAYS = 150;
+
+/** The days on which a chain's estimate is kept, oldest first: so many weeks ago, and right after each treatment and two weeks before the next. */
+function daysKept(
+  { treatments }: Household,
+  chain: Chain,
+  today: string,
+  weeksAgo: readonly number[],
+): string[] {
+  const days = new Set(weeksAgo.map((weeks) => plusDays(today, -7 * weeks)));
+  const own = treatments
+    .filter(({ chainId }) => chainId === chain.id)
+    .map(({ day }) => day)
+    .sort();
+  for (const [i, day] of own.entries()) {
+    const since = own[i - 1];
+    if (since === undefined || day < plusDays(today, -JUDGED_DAYS)) continue;
+    if (since < day) days.add(since);
+    if (since <= plusDays(day, -14)) days.add(plusDays(day, -14));
+  }
+  return [...days].sort();
+}
+
+/** What would have been said of each chain on past days, by the library itself, knowing only what was known then. */
 export function keptEstimates(
   random: Random,
   household: Household,
@@ -21,8 +46,7 @@ export function keptEstimates(
   const kept: Estimate[] = [];
   for (const chain of household.chains) {
     let previous: PreviousEstimate | undefined;
-    for (const week of weeksAgo) {
-      const madeOn = plusDays(today, -7 * week);
+    for (const madeOn of daysKept(household, chain, today, weeksAgo)) {
       const history = historyAsOf(household, chain, madeOn, settings);
       if (!history) continue;
       const detail = toDetail(estimateChain({ ...history, previous }, model));

@@ -23,17 +23,23 @@ export class EstimatesTasks implements OnModuleInit {
   onModuleInit(): void {
     this.queue.handle('estimate-chain', (task) => this.estimateChain(task));
     this.queue.handle('estimate-workshop', (task) => this.estimateWorkshop(task));
+    this.workshops.onModelChanged.add((workshopId) => this.estimateAnew(workshopId));
   }
 
   async estimateChain({ workshopId, chainId }: Tasks['estimate-chain']): Promise<void> {
     await this.db.run({ workshopId }, () => this.estimator.estimate(workshopId, [chainId]));
   }
 
+  private estimateAnew(workshopId: string): Promise<void> {
+    const since = this.clock.now().toISOString();
+    return this.queue.send('estimate-workshop', { workshopId, since }, { key: `${workshopId} ${since}` });
+  }
+
   /**
    * Estimates every chain in service that has no estimate of today. What was done stays done, batch by batch: begun
    * again after a crash, or beside another, it goes on with what is left.
    */
-  async estimateWorkshop({ workshopId }: Tasks['estimate-workshop']): Promise<void> {
+  async estimateWorkshop({ workshopId, since }: Tasks['estimate-workshop']): Promise<void> {
     const today = await this.db.run({ workshopId }, async () => {
       const { timeZone } = await this.workshops.current(workshopId);
       return this.clock.today(timeZone);
@@ -41,7 +47,7 @@ export class EstimatesTasks implements OnModuleInit {
     let ids: string[] = [];
     do {
       ids = await this.db.run({ workshopId }, async () => {
-        const next = await this.nextBatch(today, ids.at(-1));
+        const next = await this.nextBatch(today, since, ids.at(-1));
         if (next.length > 0) await this.estimator.estimate(workshopId, next);
         return next;
       });
@@ -57,13 +63,18 @@ export class EstimatesTasks implements OnModuleInit {
       await this.queue.send('refit-workshop', { workshopId }, { key: workshopId });
   }
 
-  private async nextBatch(today: string, after = '00000000-0000-0000-0000-000000000000'): Promise<string[]> {
+  private async nextBatch(
+    today: string,
+    since = '-infinity',
+    after = '00000000-0000-0000-0000-000000000000',
+  ): Promise<string[]> {
     const rows = await this.db.manager.query<{ id: string }[]>(
       `select id from chain
         where retired_on is null and id > $1
-          and not exists (select from estimate where chain_id = chain.id and made_on = $2)
+          and not exists (select from estimate
+                           where chain_id = chain.id and made_on = $2 and made_at >= $3::timestamptz)
         order by id limit ${BATCH}`,
-      [after, today],
+      [after, today, since],
     );
     return rows.map(({ id }) => id);
   }

@@ -1,7 +1,8 @@
 /** Every named task of the queue and what it is given. Ids only: what matters is read when the task runs. */
 export interface Tasks {
   'estimate-chain': { workshopId: string; chainId: string };
-  'estimate-workshop': { workshopId: string };
+  /** With `since`, an instant, estimates made before it don't count: what they were made from has changed. */
+  'estimate-workshop': { workshopId: string; since?: string };
   'refit-workshop': { workshopId: string };
   'import-rides': { workshopId: string; importId: string };
   'send-mail': { mailId: string; workshopId?: string; accountId?: string };

@@ -1,11 +1,12 @@
 import { Injectable } from '@nestjs/common';
 import type { Regime, Workload } from '@halfpitch/contracts';
-import { dayOf, isoDay, withRenewals } from '@halfpitch/estimation';
+import { comeChance, dayOf, isoDay, waitingVisits, withRenewals } from '@halfpitch/estimation';
 import { Clock } from '../common/clock';
 import { TenantDb } from '../database/tenant-db';
 import type { EstimateDetail } from '../estimates/estimate.entity';
 import type { StoredSettings } from '../workshop/workshop.entity';
 import { WorkshopService } from '../workshop/workshop.service';
+import { answers, summary } from './answers';
 import { band, counts, map, plus } from './counts';
 import { ChainChance, chainsOfWeek, KeptChances, mondayOf, shiftWeeks } from './week-chances';
 
@@ -60,15 +61,20 @@ export class WorkloadService {
 
   async read(workshopId: string): Promise<Workload> {
     const { settings, timeZone } = await this.workshops.current(workshopId);
-    const monday = mondayOf(dayOf(this.clock.today(timeZone)));
+    const today = this.clock.today(timeZone);
+    const monday = mondayOf(dayOf(today));
+    const answered = await answers(this.db.manager, today);
+    const comes = comeChance(answered);
     const rows = await this.db.manager.query<Row[]>(NEWEST);
     const chains = rows.map((row) => toChance(row, monday));
     const visits = chains.map(({ lubrication, renewal, dipped }) => ({
       dipped,
-      chances: lubrication ? withRenewals(lubrication, WEEKS, renewal) : [],
+      chances: lubrication ? withRenewals(lubrication, WEEKS, renewal, comes) : [],
     }));
+    const replacing = chains.map(({ replacement }) => waitingVisits(replacement, WEEKS, comes));
     return {
       minutesPerWeek: settings.bench.minutesPerWeek,
+      coming: { chancePerWeek: comes, ...summary(answered) },
       weeks: Array.from({ length: WEEKS }, (_, w) => {
         const inWeek = visits.map(({ dipped, chances }) => ({ dipped, chance: chances[w] ?? 0 }));
         return {
@@ -76,7 +82,7 @@ export class WorkloadService {
           to: isoDay(monday + 7 * w + 6),
           ...weekLoad(
             inWeek,
-            chains.map(({ replacement }) => replacement[w] ?? 0),
+            replacing.map((chances) => chances[w]!),
             settings.bench,
           ),
           chains: chainsOfWeek(chains, w),

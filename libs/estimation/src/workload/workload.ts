@@ -48,12 +48,17 @@ export function withRenewals(
   return visits(first, weeks, comes, renewal);
 }
 
+/** Chance of a visit in each week, where what fell due waits until its rider comes and does not fall due again. */
+export function waitingVisits(due: readonly number[], weeks: number, comes: number): number[] {
+  return visits(due, weeks, comes, []);
+}
+
 /** Expected treatments and replacements per week: chains are independent, so each week's count is Poisson-binomial. */
 export function workload(chains: readonly ChainChances[], { weeks, comes }: WorkloadOptions): WeekLoad[] {
   const treating = chains.flatMap(({ lubrication, renewal }) =>
     lubrication ? [withRenewals(lubrication, weeks, renewal, comes)] : [],
   );
-  const replacing = chains.map(({ replacement }) => visits(replacement, weeks, comes, []));
+  const replacing = chains.map(({ replacement }) => waitingVisits(replacement, weeks, comes));
   return Array.from({ length: weeks }, (_, w) => ({
     treatments: summary(treating.map((chances) => chances[w]!)),
     replacements: summary(replacing.map((chances) => chances[w]!)),

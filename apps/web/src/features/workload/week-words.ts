@@ -24,7 +24,7 @@ export function fit({ p50, p90 }: Pick<Band, 'p50' | 'p90'>, minutes: number): '
 export const fitWords = { over: 'Too much', tight: 'May be too much', fits: 'Fits' } as const;
 
 /** The weeks in a sentence: which is the heaviest, and in how many the bench does not suffice. */
-export function benchSummary({ weeks, minutesPerWeek }: Workload, today: string): string {
+export function benchSummary({ weeks, minutesPerWeek }: Pick<Workload, 'weeks' | 'minutesPerWeek'>, today: string): string {
   const heaviest = weeks.reduce<Week | undefined>(
     (most, week) => (!most || week.benchMinutes.p50 > most.benchMinutes.p50 ? week : most),
     undefined,
@@ -41,9 +41,9 @@ export function benchSummary({ weeks, minutesPerWeek }: Workload, today: string)
 }
 
 /** Treatments and replacements over all weeks, expected number. */
-export function countSummary({ weeks }: Workload): string {
+export function countSummary({ weeks }: Pick<Workload, 'weeks'>): string {
   const sum = (of: (week: Week) => number) => whole(weeks.reduce((total, week) => total + of(week), 0));
   const treatments = sum((week) => week.treatments.mean);
   const replacements = sum((week) => week.replacements.mean);
-  return `About ${treatments} treatments and ${replacements} chain replacements in ${weeks.length} weeks. A bar is the band in which the number falls with a chance of 80 %, the mark its middle. What is due already counts in this week.`;
+  return `About ${treatments} treatments and ${replacements} chain replacements in ${weeks.length} weeks. A bar is the band in which the number falls with a chance of 80 %, the mark its middle. What is due already counts from this week on, as riders come.`;
 }
