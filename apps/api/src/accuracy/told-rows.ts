@@ -58,9 +58,13 @@ const TOLD = `
       where chain_id = newest.chain_id and made_on >= since and made_on <= newest.day - 7
       order by made_on desc limit 1)) told
   where jsonb_typeof(told.detail -> about) = 'object'
+    and told.detail -> about ->> 'decidedBy' is distinct from 'calendar'
   order by newest.day desc, newest.chain_id`;
 
-/** Windows told and what was seen, the newest looks first; a chain in the box had no window to be judged. */
+/**
+ * Windows told and what was seen, the newest looks first. A chain in the box had no window, and one that the calendar
+ * decided says nothing of how long the treatment lasts.
+ */
 export function toldRows(manager: EntityManager, today: string): Promise<ToldRow[]> {
   return manager.query<ToldRow[]>(TOLD, [today]);
 }

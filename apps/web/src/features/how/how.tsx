@@ -1,5 +1,6 @@
-import { Stack } from '@chakra-ui/react';
+import { Link, Stack, Text } from '@chakra-ui/react';
 import { useQuery } from '@tanstack/react-query';
+import { Link as RouterLink } from 'react-router-dom';
 import { useSession } from '../../app/session';
 import { Loaded } from '../../components/loaded';
 import { PageHeader } from '../../components/page-header';
@@ -13,7 +14,7 @@ import { OwnNarrowing } from './own-narrowing';
 
 /** How the estimates come about, in plain words and with this workshop's own figures. */
 export function How() {
-  const { workshop, riderId } = useSession();
+  const { workshop, riderId, role } = useSession();
   const query = useQuery(settingsQuery);
   return (
     <>
@@ -30,6 +31,14 @@ export function How() {
             <HowWindow policy={settings.reminderPolicy} />
             <HowNarrow />
             {riderId && <OwnNarrowing />}
+            {role !== 'rider' && (
+              <Text>
+                How often the windows held so far:{' '}
+                <Link asChild>
+                  <RouterLink to="/accuracy">how right we were</RouterLink>
+                </Link>
+              </Text>
+            )}
           </Stack>
         )}
       </Loaded>

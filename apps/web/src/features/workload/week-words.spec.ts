@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { Workload } from '@halfpitch/contracts';
-import { bandWords, benchSummary, fit, weekWords } from './week-words';
+import { bandWords, benchSummary, fit, weekWords, comingSummary } from './week-words';
 
 const band = (p10: number, p50: number, p90: number) => ({ p10, p50, p90, mean: p50 });
 const week = (from: string, to: string, minutes: [number, number, number]): Workload['weeks'][number] => ({
@@ -41,5 +41,14 @@ describe('the week ahead in words', () => {
       'No week is likely to be too full.',
     );
     expect(benchSummary({ weeks: [], minutesPerWeek: 600 }, today)).toBe('No work is in sight.');
+  });
+
+  it('says when riders come, and what that was learned from', () => {
+    expect(comingSummary({ chancePerWeek: 0.427, reminders: 118, cameInThreeWeeks: 109 })).toBe(
+      'A rider who is due is counted as coming within a week with a chance of 43 %: of 118 reminders 109 were followed by a treatment within three weeks.',
+    );
+    expect(comingSummary({ chancePerWeek: 0.5, reminders: 0, cameInThreeWeeks: 0 })).toContain(
+      'taught better',
+    );
   });
 });

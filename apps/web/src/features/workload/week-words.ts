@@ -1,5 +1,5 @@
 import type { Workload } from '@halfpitch/contracts';
-import { spanWords } from '../../app/format';
+import { percent, spanWords } from '../../app/format';
 
 export type Week = Workload['weeks'][number];
 export type Band = Week['treatments'];
@@ -24,7 +24,10 @@ export function fit({ p50, p90 }: Pick<Band, 'p50' | 'p90'>, minutes: number): '
 export const fitWords = { over: 'Too much', tight: 'May be too much', fits: 'Fits' } as const;
 
 /** The weeks in a sentence: which is the heaviest, and in how many the bench does not suffice. */
-export function benchSummary({ weeks, minutesPerWeek }: Pick<Workload, 'weeks' | 'minutesPerWeek'>, today: string): string {
+export function benchSummary(
+  { weeks, minutesPerWeek }: Pick<Workload, 'weeks' | 'minutesPerWeek'>,
+  today: string,
+): string {
   const heaviest = weeks.reduce<Week | undefined>(
     (most, week) => (!most || week.benchMinutes.p50 > most.benchMinutes.p50 ? week : most),
     undefined,
@@ -38,6 +41,13 @@ export function benchSummary({ weeks, minutesPerWeek }: Pick<Workload, 'weeks' |
   if (over > 0) return `${most} In ${weeksOf(over)} there is most likely more work than time.`;
   if (tight > 0) return `${most} In ${weeksOf(tight)} there may be more work than time.`;
   return `${most} No week is likely to be too full.`;
+}
+
+/** When riders who are due come, and what that was learned from. */
+export function comingSummary({ chancePerWeek, reminders, cameInThreeWeeks }: Workload['coming']): string {
+  const odds = `A rider who is due is counted as coming within a week with a chance of ${percent(chancePerWeek)}`;
+  if (reminders === 0) return `${odds}, until reminders have taught better.`;
+  return `${odds}: of ${reminders} reminders ${cameInThreeWeeks} were followed by a treatment within three weeks.`;
 }
 
 /** Treatments and replacements over all weeks, expected number. */

@@ -1,8 +1,9 @@
-import { Button, Grid, Stack } from '@chakra-ui/react';
+import { Button, Flex, Grid, Link, Stack, Text } from '@chakra-ui/react';
 import type { Workload } from '@halfpitch/contracts';
 import { useQuery } from '@tanstack/react-query';
 import { Printer } from 'lucide-react';
 import { lazy } from 'react';
+import { Link as RouterLink } from 'react-router-dom';
 import { useFormat } from '../../app/use-format';
 import { ChartFrame } from '../../components/chart-frame';
 import { EmptyState } from '../../components/empty-state';
@@ -12,7 +13,7 @@ import { useUrlState } from '../../components/use-url-state';
 import { workloadQuery } from './api/workload';
 import { WeekChains } from './week-chains';
 import { WeekTable } from './week-table';
-import { benchSummary, countSummary, weekWords } from './week-words';
+import { benchSummary, comingSummary, countSummary, weekWords } from './week-words';
 
 const CountChart = lazy(() => import('./count-chart'));
 const MinutesChart = lazy(() => import('./minutes-chart'));
@@ -58,6 +59,9 @@ function TwelveWeeks({ load }: { load: Workload }) {
           <MinutesChart load={load} />
         </ChartFrame>
       </Grid>
+      <Text color="fg.muted" maxWidth="52rem">
+        {comingSummary(load.coming)}
+      </Text>
       <Grid
         templateColumns={{ base: '1fr', xl: 'minmax(0, 3fr) minmax(0, 2fr)' }}
         gap="10"
@@ -79,10 +83,15 @@ export function Weeks() {
         title="The week ahead"
         lead="The coming twelve weeks, with the band each figure falls in with a chance of 80 %."
         actions={
-          <Button variant="outline" onClick={() => window.print()}>
-            <Printer size={20} aria-hidden="true" />
-            Print
-          </Button>
+          <Flex gap="5" align="center" className="no-print">
+            <Link asChild>
+              <RouterLink to="/accuracy">How right we were</RouterLink>
+            </Link>
+            <Button variant="outline" onClick={() => window.print()}>
+              <Printer size={20} aria-hidden="true" />
+              Print
+            </Button>
+          </Flex>
         }
       />
       <Loaded query={query} rows={2} height="22rem">
