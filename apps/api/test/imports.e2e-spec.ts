@@ -211,3 +211,48 @@ describe('what cannot be taken in', () => {
     await owner.get(`/api/imports/${mine.body.id}`).expect(200);
   });
 });
+
+describe('a ride of a file', () => {
+  const file = () => `date,distance_km\n${daysAgo(5)},10.5\n${daysAgo(4)},12.5\n`;
+
+  it('regression: put back after it was removed, is the same ride of the same file', async () => {
+    await imported(file(), 'log.csv');
+    const [ride] = (await rides()).items;
+    await browser.delete(`/api/rides/${ride.id}`).expect(200);
+    await stranger.post(`/api/rides/${ride.id}/restore`).expect(404);
+    expect((await browser.post(`/api/rides/${ride.id}/restore`).expect(200)).body).toEqual(ride);
+    expect((await browser.post(`/api/rides/${ride.id}/restore`).expect(200)).body).toEqual(ride);
+    expect(await imported(file(), 'log.csv')).toMatchObject({ added: 0, alreadyThere: 2 });
+  });
+
+  it('is not put back where its file brought it back first', async () => {
+    await imported(file(), 'log.csv');
+    const [ride] = (await rides()).items;
+    await browser.delete(`/api/rides/${ride.id}`).expect(200);
+    expect(await imported(file(), 'log.csv')).toMatchObject({ added: 1, alreadyThere: 1 });
+    await browser.post(`/api/rides/${ride.id}/restore`).expect(409);
+    expect((await rides()).total).toBe(2);
+  });
+
+  it('regression: moved to another bike, is not brought back by its file, nor doubled on the way home', async () => {
+    await imported(file(), 'log.csv');
+    const [{ id, day, distanceM, surface, weather }] = (await rides()).items;
+    const second = await newBike(browser, rider.id, { name: 'Second' });
+    const move = (bikeId: string) =>
+      browser.put(`/api/rides/${id}`).send({ bikeId, day, distanceM, surface, weather }).expect(200);
+    await move(second.id);
+    expect(await imported(file(), 'log.csv')).toMatchObject({ added: 0, alreadyThere: 2 });
+    await move(bike.id);
+    expect(await imported(file(), 'log.csv')).toMatchObject({ added: 0, alreadyThere: 2 });
+  });
+});
+
+it('lists the files that were sent, newest first, to the rider and the staff', async () => {
+  const run = gpx(new Date(`${daysAgo(8)}T08:00:00Z`), 20, 150).replace('cycling', 'running');
+  const sent = [await imported(log(2), 'first.csv'), await imported(run, 'second.gpx')];
+  const { body } = await browser.get('/api/imports').query({ size: 2 }).expect(200);
+  expect(body.items).toEqual(sent.reverse());
+  expect(body.items[0]).toMatchObject({ bikeId: bike.id, refused: 1, otherSport: 1 });
+  expect((await owner.get('/api/imports').query({ riderId: rider.id, size: 2 })).body.items).toEqual(sent);
+  expect((await stranger.get('/api/imports').query({ riderId: rider.id })).body.total).toBe(0);
+});

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { id } from './common';
+import { id, instant, pageOf, pageQuery } from './common';
 import { surfaces, weathers } from './trade';
 
 /** The largest file that POST /api/imports takes. */
@@ -66,9 +66,18 @@ export const rideImport = z.object({
   total: z.number().int(),
   added: z.number().int(),
   alreadyThere: z.number().int(),
+  /** Not taken, whatever the reason. */
   refused: z.number().int(),
+  /** Of those, recordings of another sport. */
+  otherSport: z.number().int(),
   /** What was wrong, line by line (null where the file has no lines), at most the first 50. */
   problems: z.array(z.object({ line: z.number().int().nullable(), message: z.string() })),
   message: z.string(),
+  bikeId: id,
+  sentAt: instant,
 });
 export type RideImport = z.infer<typeof rideImport>;
+/** GET /api/imports: files sent before, newest first; a rider is shown their own only. */
+export const rideImportPage = pageOf(rideImport);
+export const rideImportQuery = pageQuery.extend({ riderId: id.optional() });
+export type RideImportQuery = z.infer<typeof rideImportQuery>;

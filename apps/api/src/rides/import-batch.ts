@@ -4,6 +4,7 @@ import { plusDays } from '../common/calendar';
 import { TenantDb } from '../database/tenant-db';
 import { KnownRide, KnownRides } from './known-rides';
 import { ReadRide } from './read-rides';
+import { movedKey } from './ride-key';
 import { RideImport } from './ride-import.entity';
 import { Ride } from './ride.entity';
 
@@ -17,8 +18,12 @@ export class ImportBatch {
 
   /** Inserts what is not there yet and tells how many were. */
   async keep(target: RideImport, rides: ReadRide[]): Promise<number> {
+    await this.oneAtATime(target);
     const known = new KnownRides(await this.near(target.riderId, rides));
-    const fresh = rides.filter((ride) => !known.has(ride) && (known.add(ride), true));
+    const moved = await this.moved(target, rides);
+    const fresh = rides.filter(
+      (ride) => !moved.has(ride.fingerprint) && !known.has(ride) && (known.add(ride), true),
+    );
     if (fresh.length === 0) return 0;
     const chains = await this.rideChains.chainsOn(
       target.bikeId,
@@ -34,6 +39,22 @@ export class ImportBatch {
       .returning('id')
       .execute();
     return (raw as unknown[]).length;
+  }
+
+  /** Two files of one rider, read at once, could hold the same ride: until the commit the others wait. */
+  private async oneAtATime({ riderId }: RideImport): Promise<void> {
+    await this.db.manager.query('select pg_advisory_xact_lock(hashtextextended($1, 0))', [riderId]);
+  }
+
+  /** Keys of these rides that were read for this bike before and went to another since. */
+  private async moved({ bikeId, riderId }: RideImport, rides: ReadRide[]): Promise<Set<string>> {
+    const keys = new Map(rides.map(({ fingerprint }) => [movedKey(bikeId, fingerprint), fingerprint]));
+    const rows = await this.db.manager.query<{ key: string }[]>(
+      `select fingerprint as key from ride join bike on bike.id = ride.bike_id
+        where bike.rider_id = $1 and fingerprint = any($2)`,
+      [riderId, [...keys.keys()]],
+    );
+    return new Set(rows.map(({ key }) => keys.get(key)!));
   }
 
   /** The rider's rides of these days, on whichever bike. */

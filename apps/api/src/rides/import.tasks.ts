@@ -6,7 +6,8 @@ import { QueueService } from '../jobs/queue.service';
 import type { Tasks } from '../jobs/tasks';
 import { WorkshopService } from '../workshop/workshop.service';
 import { ImportBatch } from './import-batch';
-import { ReadFile, readRides, ReadRide } from './read-rides';
+import { readAside } from './read-aside';
+import { ReadFile, ReadRide } from './read-rides';
 import { RideImport } from './ride-import.entity';
 
 const BATCH = 200;
@@ -36,7 +37,7 @@ export class ImportTasks implements OnModuleInit {
     const opened = await this.db.run(scope, () => this.open(workshopId, importId));
     if (!opened) return;
     const { target, file, timeZone, today } = opened;
-    const read = await readRides(target, file, { timeZone, today });
+    const read = await readAside(target, file, { timeZone, today });
     await this.db.run(scope, () => this.begin(target, read));
     let done = target.added + target.alreadyThere;
     while (done < read.rides.length) {
@@ -61,11 +62,12 @@ export class ImportTasks implements OnModuleInit {
     return { target, file: target.file, timeZone, today: this.clock.today(timeZone) };
   }
 
-  private async begin({ id }: RideImport, { rides, problems }: ReadFile): Promise<void> {
+  private async begin({ id }: RideImport, { rides, problems, otherSport }: ReadFile): Promise<void> {
     await this.db.manager.update(RideImport, id, {
       state: 'running',
       total: rides.length + problems.length,
       refused: problems.length,
+      otherSport,
       problems: problems.slice(0, PROBLEMS_KEPT),
     });
   }

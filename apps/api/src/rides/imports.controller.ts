@@ -1,6 +1,16 @@
-import { Body, Controller, Get, HttpCode, Param, Post, SerializeOptions, UploadedFile } from '@nestjs/common';
-import { id, importTarget, rideImport } from '@halfpitch/contracts';
-import type { ImportTarget, RideImport } from '@halfpitch/contracts';
+import {
+  Body,
+  Controller,
+  Get,
+  HttpCode,
+  Param,
+  Post,
+  Query,
+  SerializeOptions,
+  UploadedFile,
+} from '@nestjs/common';
+import { id, importTarget, rideImport, rideImportPage, rideImportQuery } from '@halfpitch/contracts';
+import type { ImportTarget, Page, RideImport, RideImportQuery } from '@halfpitch/contracts';
 import { Who } from '../common/actor';
 import type { Actor } from '../common/actor';
 import { Permit } from '../common/permit';
@@ -21,6 +31,16 @@ export class ImportsController {
     @UploadedFile() file?: ReceivedFile,
   ): Promise<RideImport> {
     return this.imports.receive(actor, target, file);
+  }
+
+  @Get()
+  @Permit('rides.write')
+  @SerializeOptions({ schema: rideImportPage })
+  list(
+    @Who() actor: Actor,
+    @Query({ schema: rideImportQuery }) query: RideImportQuery,
+  ): Promise<Page<RideImport>> {
+    return this.imports.list(actor, query);
   }
 
   @Get(':id')

@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common';
-import type { ImportTarget, RideImport as WireImport } from '@halfpitch/contracts';
+import type { ImportTarget, Page, RideImport as WireImport, RideImportQuery } from '@halfpitch/contracts';
 import { Bike } from '../bikes/bike.entity';
 import { BikesService } from '../bikes/bikes.service';
 import { ChainsService } from '../chains/chains.service';
@@ -7,7 +7,8 @@ import type { Actor } from '../common/actor';
 import { notFound, unprocessable } from '../common/problems';
 import { TenantDb } from '../database/tenant-db';
 import { QueueService } from '../jobs/queue.service';
-import { mayReachRider } from '../riders/riders.policy';
+import { pageOf } from '../common/paging';
+import { mayReachRider, ridersInReach } from '../riders/riders.policy';
 import { RideImport } from './ride-import.entity';
 
 /** What of a received file is used. */
@@ -17,8 +18,19 @@ export interface ReceivedFile {
 }
 
 function toImport(rideImport: RideImport): WireImport {
-  const { id, fileName, state, total, added, alreadyThere, refused, problems, message } = rideImport;
-  return { id, fileName, state, total, added, alreadyThere, refused, problems, message };
+  const { id, fileName, state, total, added, alreadyThere, refused, otherSport, problems, message, bikeId } =
+    rideImport;
+  const counts = { total, added, alreadyThere, refused, otherSport };
+  return {
+    id,
+    fileName,
+    state,
+    ...counts,
+    problems,
+    message,
+    bikeId,
+    sentAt: rideImport.createdAt.toISOString(),
+  };
 }
 
 /** Takes files in; a task of the queue reads them. */
@@ -55,6 +67,13 @@ export class ImportsService {
     const rideImport = await this.db.manager.findOneBy(RideImport, { id });
     if (!rideImport || !mayReachRider(actor, rideImport.riderId)) throw notFound('import');
     return toImport(rideImport);
+  }
+
+  list(actor: Actor, { riderId, ...page }: RideImportQuery): Promise<Page<WireImport>> {
+    const query = this.db.manager.createQueryBuilder(RideImport, 'import').orderBy('import.id', 'DESC');
+    const rider = ridersInReach(actor, riderId);
+    if (rider) query.andWhere('import.riderId = :rider', { rider });
+    return pageOf(query, page, toImport);
   }
 
   /** The bike that is meant: itself, or the one the chain is on. */

@@ -12,6 +12,8 @@ export interface ReadRide extends FileRide {
 export interface ReadFile {
   rides: ReadRide[];
   problems: WireImport['problems'];
+  /** Of the problems, recordings of another sport. */
+  otherSport: number;
   /** The whole file in a sentence, where it holds no ride. */
   message: string;
 }
@@ -22,7 +24,8 @@ export interface Choices {
   otherSports: 'leave' | 'take';
   matching: CsvMatching | null;
 }
-interface Calendar {
+/** Where the workshop is, and which day it is there. */
+export interface Calendar {
   timeZone: string;
   today: string;
 }
@@ -42,7 +45,7 @@ export async function readRides(
   bytes: Uint8Array,
   { timeZone, today }: Calendar,
 ): Promise<ReadFile> {
-  const { fileName, matching } = choices;
+  const { fileName, matching, otherSports } = choices;
   const results = await readWholeRideFile(fileName, bytes, { timeZone, ...(matching && { matching }) });
   const rides: Omit<ReadRide, 'fingerprint'>[] = [];
   const problems: WireImport['problems'] = [];
@@ -59,6 +62,8 @@ export async function readRides(
   return {
     rides: rides.map((ride, index) => ({ ...ride, fingerprint: fingerprints[index]! })),
     problems,
+    otherSport:
+      otherSports === 'take' ? 0 : results.filter(({ outcome }) => outcome === 'other-sport').length,
     message: rides.length > 0 ? '' : summariseFile(fileName, results).message,
   };
 }

@@ -46,9 +46,16 @@ export class RideImport extends TenantEntity {
   @Column('integer')
   refused: number = 0;
 
+  /** Of those refused, recordings of another sport. */
+  @Column('integer')
+  otherSport: number = 0;
+
   @Column('jsonb')
   problems: WireImport['problems'] = [];
 
   @Column('text')
   message: string = '';
+
+  @Column('timestamptz', { default: () => 'now()' })
+  createdAt: Date;
 }

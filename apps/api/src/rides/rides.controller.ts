@@ -4,6 +4,7 @@ import {
   Delete,
   Get,
   Headers,
+  HttpCode,
   Param,
   Post,
   Put,
@@ -90,5 +91,13 @@ export class RidesController {
   @SerializeOptions({ schema: done })
   remove(@Who() actor: Actor, @Param('id', { schema: id }) rideId: string): Promise<Done> {
     return this.rides.remove(actor, rideId).then(() => ({ done: true }));
+  }
+
+  @Post(':id/restore')
+  @HttpCode(200)
+  @Permit('rides.write')
+  @SerializeOptions({ schema: ride })
+  restore(@Who() actor: Actor, @Param('id', { schema: id }) rideId: string): Promise<Ride> {
+    return this.rides.restore(actor, rideId);
   }
 }

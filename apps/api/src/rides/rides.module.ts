@@ -7,6 +7,7 @@ import { ImportTasks } from './import.tasks';
 import { ImportsController } from './imports.controller';
 import { ImportsService } from './imports.service';
 import { receiveFile } from './receive-file';
+import { RemovedRides } from './removed-rides';
 import { RidesController } from './rides.controller';
 import { RidesService } from './rides.service';
 import { RidingDaysService } from './riding-days.service';
@@ -14,7 +15,7 @@ import { RidingDaysService } from './riding-days.service';
 @Module({
   imports: [WorkshopModule, BikesModule, ChainsModule],
   controllers: [RidesController, ImportsController],
-  providers: [RidesService, RidingDaysService, ImportsService, ImportBatch, ImportTasks],
+  providers: [RidesService, RemovedRides, RidingDaysService, ImportsService, ImportBatch, ImportTasks],
 })
 export class RidesModule implements NestModule {
   configure(consumer: MiddlewareConsumer): void {

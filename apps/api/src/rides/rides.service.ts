@@ -7,11 +7,13 @@ import { RideChains } from '../chains/ride-chains';
 import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { pageOf } from '../common/paging';
-import { notFound, ProblemException, unprocessable } from '../common/problems';
+import { conflict, notFound, ProblemException, unprocessable } from '../common/problems';
 import { TenantDb } from '../database/tenant-db';
 import { ridersInReach } from '../riders/riders.policy';
 import { Bike } from '../bikes/bike.entity';
+import { RemovedRides } from './removed-rides';
 import { Ride } from './ride.entity';
+import { keyOnBike } from './ride-key';
 import { mayReachRide, wrongDay } from './rides.policy';
 
 function toRide(ride: Ride): WireRide {
@@ -27,6 +29,7 @@ export class RidesService {
     private readonly bikes: BikesService,
     private readonly rideChains: RideChains,
     private readonly changes: ChainChanges,
+    private readonly removed: RemovedRides,
     private readonly clock: Clock,
   ) {}
 
@@ -85,15 +88,29 @@ export class RidesService {
     await this.check(actor, input);
     const before = { ...ride };
     const chainId = await this.rideChains.chainOn(input.bikeId, input.day);
-    await this.db.manager.save(Ride, Object.assign(ride, input, { chainId }));
+    const fingerprint = keyOnBike(ride.fingerprint, ride.bikeId, input.bikeId);
+    await this.db.manager.save(Ride, Object.assign(ride, input, { chainId, fingerprint }));
     await this.told(actor, before, ride);
     return toRide(ride);
   }
 
   async remove(actor: Actor, id: string): Promise<void> {
     const ride = await this.reach(actor, id);
-    await this.db.manager.delete(Ride, id);
+    await this.removed.take(ride);
     await this.told(actor, ride);
+  }
+
+  /** Puts a ride back that was removed a short while ago: a ride of a file stays one. */
+  async restore(actor: Actor, id: string): Promise<WireRide> {
+    const found = await this.removed.find(id);
+    if (!found) return toRide(await this.reach(actor, id));
+    await this.bikes.reach(actor, found.bikeId);
+    const chainId = await this.rideChains.chainOn(found.bikeId, found.day);
+    if (!(await this.removed.putBack(id, chainId)))
+      throw conflict('The ride is there again already: its file was read in the meantime.');
+    const ride = await this.reach(actor, id);
+    await this.told(actor, ride);
+    return toRide(ride);
   }
 
   private async reach(actor: Actor, id: string): Promise<Ride> {
