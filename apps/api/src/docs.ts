@@ -5,6 +5,11 @@ import { ApiResponse, DocumentBuilder, SwaggerModule } from '@nestjs/swagger';
 import { problem } from '@halfpitch/contracts';
 import type { z } from 'zod';
 
+const TOKENS =
+  'A personal token, made under Account. Scopes: read (bikes, chains, rides, readings, estimates), rides:write, ' +
+  'readings:write; never accounts or tokens. POST /api/rides with an Idempotency-Key of your own keeps a ride that is ' +
+  'sent twice once. At most 1,800 calls in 15 minutes.';
+
 type Handler = (...args: unknown[]) => unknown;
 
 /** What @SerializeOptions, @HttpCode and the method decorators left on a handler. */
@@ -45,6 +50,9 @@ export function mountDocs(app: NestExpressApplication): void {
     )
     .setVersion('1')
     .addCookieAuth('halfpitch')
+    .addBearerAuth({ type: 'http', scheme: 'bearer', description: TOKENS }, 'token')
+    .addSecurityRequirements('cookie')
+    .addSecurityRequirements('token')
     .addGlobalResponse({
       status: 'default',
       description: 'What went wrong, as problem details (RFC 9457).',

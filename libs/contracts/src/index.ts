@@ -1,5 +1,6 @@
 export * from './accuracy';
 export * from './accounts';
+export * from './api-tokens';
 export * from './bikes';
 export * from './chains';
 export * from './common';

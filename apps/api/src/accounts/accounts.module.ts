@@ -1,8 +1,11 @@
-import { Module } from '@nestjs/common';
+import { MiddlewareConsumer, Module, NestModule } from '@nestjs/common';
 import { PassportModule } from '@nestjs/passport';
 import { AccountsController } from './accounts.controller';
 import { AccountsService } from './accounts.service';
 import { ActorsService } from './actors.service';
+import { ApiTokensController } from './api-tokens.controller';
+import { ApiTokensService } from './api-tokens.service';
+import { BearerMiddleware } from './bearer.middleware';
 import { Directory } from './directory';
 import { InvitationsService } from './invitations.service';
 import { PasswordsService } from './passwords.service';
@@ -18,10 +21,11 @@ import { TokensService } from './tokens.service';
 
 @Module({
   imports: [PassportModule.register({ session: true })],
-  controllers: [SessionController, AccountsController, StaffController],
+  controllers: [SessionController, AccountsController, ApiTokensController, StaffController],
   providers: [
     AccountsService,
     ActorsService,
+    ApiTokensService,
     Directory,
     InvitationsService,
     PasswordsService,
@@ -35,4 +39,8 @@ import { TokensService } from './tokens.service';
   ],
   exports: [InvitationsService],
 })
-export class AccountsModule {}
+export class AccountsModule implements NestModule {
+  configure(consumer: MiddlewareConsumer): void {
+    consumer.apply(BearerMiddleware).forRoutes('{*every}');
+  }
+}

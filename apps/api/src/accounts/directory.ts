@@ -29,4 +29,14 @@ export class Directory {
     ]);
     return rows[0];
   }
+
+  async apiToken(
+    secret: string,
+  ): Promise<{ id: string; account_id: string; workshop_id: string } | undefined> {
+    const rows = await this.db.manager.query<{ id: string; account_id: string; workshop_id: string }[]>(
+      'select * from api_token_for_hash($1)',
+      [hashToken(secret)],
+    );
+    return rows[0];
+  }
 }

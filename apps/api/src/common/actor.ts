@@ -1,6 +1,6 @@
 import 'passport';
 import { createParamDecorator, ExecutionContext } from '@nestjs/common';
-import type { DistanceUnit, Role } from '@halfpitch/contracts';
+import type { DistanceUnit, Role, TokenScope } from '@halfpitch/contracts';
 import type { Request } from 'express';
 
 /** Who is asking: one person in one workshop, in one role. */
@@ -20,6 +20,8 @@ export interface Actor {
 declare module 'express-serve-static-core' {
   interface Request {
     user?: Actor | undefined;
+    /** What the call's token may do, where it came with one instead of a session. */
+    tokenScopes?: readonly TokenScope[];
   }
 }
 

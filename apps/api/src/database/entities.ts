@@ -1,5 +1,6 @@
 import { AccountToken } from '../accounts/account-token.entity';
 import { Account } from '../accounts/account.entity';
+import { ApiToken } from '../accounts/api-token.entity';
 import { Member } from '../accounts/member.entity';
 import { Bike } from '../bikes/bike.entity';
 import { OdometerReading } from '../bikes/odometer-reading.entity';
@@ -18,6 +19,7 @@ import { Workshop } from '../workshop/workshop.entity';
 export const entities = [
   Account,
   AccountToken,
+  ApiToken,
   Bike,
   Chain,
   Estimate,

@@ -4,6 +4,7 @@ import { Log1764500000003 } from './1764500000003-log';
 import { EstimatesAndReminders1764500000004 } from './1764500000004-estimates-and-reminders';
 import { ImportChoices1764500000005 } from './1764500000005-import-choices';
 import { RemovedRides1764500000009 } from './1764500000009-removed-rides';
+import { ApiTokens1764500000011 } from './1764500000011-api-tokens';
 
 export const migrations = [
   Accounts1764500000001,
@@ -12,4 +13,5 @@ export const migrations = [
   EstimatesAndReminders1764500000004,
   ImportChoices1764500000005,
   RemovedRides1764500000009,
+  ApiTokens1764500000011,
 ];
