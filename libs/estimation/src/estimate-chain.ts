@@ -11,7 +11,7 @@ import { doubtedReadings } from './elongation/doubted';
 import { narrowing } from './elongation/narrowing';
 import { elongationPosterior } from './elongation/posterior';
 import { lifeQuantile, riderLife } from './life/rider-life';
-import { currentTreatment, lifeObservations } from './life/treatments';
+import { currentTreatment, doubtfulArrival, lifeObservations } from './life/treatments';
 import { sparseQuantile } from './math/sparse-quantile';
 import { placedReadings } from './placed';
 import { forecastRiding } from './riding';
@@ -30,7 +30,8 @@ export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEs
   const perKm = factorAhead(history, fleet.factors);
 
   const treatment = currentTreatment(history);
-  const life = riderLife(treatment.kind, lifeObservations(history, usage), fleet.life);
+  const looks = lifeObservations(history, usage);
+  const life = riderLife(treatment.kind, looks, fleet.life);
   const lubeKmUsed = usage.lubeKmBetween(treatment.since, today);
   const limitDays = history.calendarLimitDays[regime];
   const running = { life, since: treatment.since, lubeKmUsed, lubePerKm: perKm.lube, limitDays };
@@ -68,6 +69,7 @@ export function estimateChain(history: ChainHistory, fleet: FleetModel): ChainEs
     shareUsed,
     chancePast,
     doubted,
+    doubtfulArrival: doubtfulArrival(history, looks, fleet.life),
   };
   return {
     wearKm: usage.wearKm,

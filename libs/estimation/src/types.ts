@@ -149,7 +149,8 @@ export interface Reason {
   data: Record<string, number>;
 }
 
-export type AlertCode = 'wet-ride-rust' | 'quiet-log' | 'past-limit' | 'doubted-reading' | 'treatment-spent';
+export type AlertCode =
+  'wet-ride-rust' | 'quiet-log' | 'past-limit' | 'doubted-reading' | 'doubted-arrival' | 'treatment-spent';
 
 export interface Alert {
   code: AlertCode;

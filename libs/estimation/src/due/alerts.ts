@@ -22,6 +22,10 @@ export function chainAlerts(history: ChainHistory, state: DueState): Alert[] {
     const day = readings.find(({ id }) => id === readingId)?.day ?? today;
     alerts.push({ code: 'doubted-reading', day, data: { readingId } });
   }
+  if (state.doubtfulArrival) {
+    const { day, lubeKm } = state.doubtfulArrival;
+    alerts.push({ code: 'doubted-arrival', day, data: { km: Math.round(lubeKm) } });
+  }
   return alerts;
 }
 

@@ -1,5 +1,5 @@
 import type { CurrentTreatment } from '../life/treatments';
-import type { DueWindow, ElongationState, Factor, RidingForecast } from '../types';
+import type { Day, DueWindow, ElongationState, Factor, RidingForecast } from '../types';
 import type { Usage } from '../usage';
 
 /** What the reasons and alerts are read from. */
@@ -16,4 +16,6 @@ export interface DueState {
   /** Chance that the wear limit is past. */
   chancePast: number;
   doubted: ElongationState['doubted'];
+  /** How the chain arrived last, where that is more likely mistaken than true. */
+  doubtfulArrival: { day: Day; lubeKm: number } | null;
 }

@@ -1,6 +1,6 @@
 import { maximise } from '../math/maximise';
 import type { LifeModel } from '../types';
-import { LifeObservation, lifeBounds, tells } from './rider-life';
+import { LifeObservation, lifeBounds, mistakenChance, tells } from './rider-life';
 import { riderLogLikelihood, SeenLife } from './rider-likelihood';
 
 type Kind = LifeObservation['kind'];
@@ -19,14 +19,15 @@ export interface LifeFit {
 
 /**
  * Lives of treatments by kind from everything a workshop has found on arrival: log-normal, interval-censored, with an
- * effect of the rider summed out, by maximum likelihood with a weak prior about `start`. Kinds never seen keep theirs.
+ * effect of the rider summed out, by maximum likelihood with a weak prior about `start`; a look that no life explains
+ * counts for little. Kinds never seen keep theirs.
  */
 export function fitLifeWithErrors(riders: readonly RiderLives[], start: LifeModel): LifeFit {
   const told = riders.map((seen) => seen.filter(tells)).filter((seen) => seen.length > 0);
   const counts = new Map<Kind, number>();
   for (const { kind } of told.flat()) counts.set(kind, (counts.get(kind) ?? 0) + 1);
   const kinds = [...counts.keys()].sort();
-  const seen = told.map((observations) => observations.map((o) => seenLife(o, kinds)));
+  const seen = told.map((observations) => observations.map((o) => seenLife(o, kinds, start)));
   const middle = Float64Array.from([
     ...kinds.map((kind) => Math.log(start.kinds[kind].median)),
     Math.log(start.logSdWithin),
@@ -66,7 +67,12 @@ export function fitLifeWithErrors(riders: readonly RiderLives[], start: LifeMode
 export const fitLife = (riders: readonly RiderLives[], start: LifeModel): LifeModel =>
   fitLifeWithErrors(riders, start).model;
 
-function seenLife({ kind, arrival, lubeKm }: LifeObservation, kinds: readonly Kind[]): SeenLife {
-  const [low, high] = lifeBounds(arrival, lubeKm);
-  return { kind: kinds.indexOf(kind), logLow: Math.log(low), logHigh: Math.log(high) };
+function seenLife(
+  { kind, arrival, lubeKm }: LifeObservation,
+  kinds: readonly Kind[],
+  start: LifeModel,
+): SeenLife {
+  const [logLow, logHigh] = lifeBounds(arrival, lubeKm).map(Math.log) as [number, number];
+  const mistaken = mistakenChance(logLow, logHigh, Math.log(start.kinds[kind].median));
+  return { kind: kinds.indexOf(kind), logLow, logHigh, mistaken };
 }

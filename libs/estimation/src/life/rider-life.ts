@@ -25,6 +25,31 @@ export function lifeBounds(arrival: ArrivalCondition, u: number): [low: number, 
 /** Whether anything was seen of the life. */
 export const tells = ({ lubeKm, arrival }: LifeObservation): boolean => lubeKm > 0 && arrival !== 'not-seen';
 
+/** One look in fifty is not what it seems: a treatment in between was never recorded, or was seen wrongly (judgement). */
+const MISTAKEN = 0.02;
+/** Sd of the log of the lives that mistaken looks suggest, about the kind's median (judgement). */
+const MISTAKEN_SD = 1.5;
+
+/** Chance of a look with these log bounds, `sound` where it is what it seems; `mistaken` is the rest. */
+export const robust = (sound: number, mistaken: number): number => (1 - MISTAKEN) * sound + mistaken;
+
+/** Weight of a look being mistaken: MISTAKEN times the chance of its bounds among mistaken ones. */
+export function mistakenChance(logLow: number, logHigh: number, logMedian: number): number {
+  const level = (log: number) => tabledCdf((log - logMedian) / MISTAKEN_SD);
+  return MISTAKEN * (level(logHigh) - level(logLow));
+}
+
+/** Whether a look is more likely mistaken than a life that this model can believe of some rider. */
+export function isDoubtful(look: LifeObservation, { kinds, logSdWithin, logSdBetween }: LifeModel): boolean {
+  if (!tells(look)) return false;
+  const [low, high] = lifeBounds(look.arrival, look.lubeKm).map(Math.log) as [number, number];
+  const median = Math.log(kinds[look.kind].median);
+  const sd = Math.hypot(logSdWithin, logSdBetween);
+  const sound = tabledCdf((high - median) / sd) - tabledCdf((low - median) / sd);
+  const mistaken = mistakenChance(low, high, median);
+  return mistaken > robust(sound, mistaken) - mistaken;
+}
+
 const NODES = 41;
 /** Nodes lie within this many sd between riders of the middle. */
 const REACH = 4;
@@ -43,13 +68,16 @@ export function riderLife(
   for (const observation of seen) {
     if (!tells(observation)) continue;
     const [low, high] = lifeBounds(observation.arrival, observation.lubeKm);
-    const mean = Math.log(model.kinds[observation.kind].median) - REACH * between;
-    const from = (Math.log(low) - mean) / within;
-    const to = (Math.log(high) - mean) / within;
+    const [logLow, logHigh] = [Math.log(low), Math.log(high)];
+    const middle = Math.log(model.kinds[observation.kind].median);
+    const mean = middle - REACH * between;
+    const from = (logLow - mean) / within;
+    const to = (logHigh - mean) / within;
+    const mistaken = mistakenChance(logLow, logHigh, middle);
     const shift = (step * between) / within;
     for (let i = 0; i < NODES; i++) {
-      const chance = tabledCdf(to - i * shift) - tabledCdf(from - i * shift);
-      logs[i]! += Math.log(Math.max(chance, LEAST_CHANCE));
+      const sound = tabledCdf(to - i * shift) - tabledCdf(from - i * shift);
+      logs[i]! += Math.log(Math.max(robust(sound, mistaken), LEAST_CHANCE));
     }
   }
   const { mean, variance } = moments(logs, (i) => between * (-REACH + i * step));

@@ -1,10 +1,13 @@
 import { tabledCdf } from '../math/normal-table';
+import { robust } from './rider-life';
 
 /** One observation of a rider: log bounds of the life, and the place of its kind among the parameters. */
 export interface SeenLife {
   kind: number;
   logLow: number;
   logHigh: number;
+  /** Weight of the look being mistaken. */
+  mistaken: number;
 }
 
 /** Log medians by kind, then log sd within and between riders. */
@@ -45,17 +48,18 @@ export function riderLogLikelihood(
     const z = -REACH + n * step;
     const row = n * parameters.length;
     let log = -0.5 * z * z;
-    for (const { kind, logLow, logHigh } of seen) {
+    for (const { kind, logLow, logHigh, mistaken } of seen) {
       const mean = parameters[kind]! + between * z;
       const from = (logLow - mean) / within;
       const to = (logHigh - mean) / within;
-      const chance = max(tabledCdf(to) - tabledCdf(from), LEAST_CHANCE);
+      const chance = max(robust(tabledCdf(to) - tabledCdf(from), mistaken), LEAST_CHANCE);
+      const soundness = robust(1, 0) / chance;
       const low = from > -ENDLESS ? exp(-0.5 * from * from) / ROOT_2PI : 0;
       const high = to < ENDLESS ? exp(-0.5 * to * to) / ROOT_2PI : 0;
       log += ln(chance);
-      const byMean = (low - high) / within / chance;
+      const byMean = ((low - high) / within) * soundness;
       slopes[row + kind]! += byMean;
-      slopes[row + kinds]! += ((low && from * low) - (high && to * high)) / chance;
+      slopes[row + kinds]! += ((low && from * low) - (high && to * high)) * soundness;
       slopes[row + kinds + 1]! += byMean * between * z;
     }
     logs[n] = log;

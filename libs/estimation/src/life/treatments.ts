@@ -1,5 +1,6 @@
-import type { ChainHistory, Day, Regime, TreatmentKind } from '../types';
+import type { ChainHistory, Day, LifeModel, Regime, TreatmentKind } from '../types';
 import type { Usage } from '../usage';
+import { isDoubtful } from './rider-life';
 import type { LifeObservation } from './rider-life';
 
 type LivingKind = LifeObservation['kind'];
@@ -49,4 +50,15 @@ export function lifeObservations(history: ChainHistory, usage: Usage): LifeObser
       arrival: treatment.arrival,
     };
   });
+}
+
+/** The newest look at a treatment's end, where it is more likely mistaken than true: its day and the lube km it claims. */
+export function doubtfulArrival(
+  history: ChainHistory,
+  looks: readonly LifeObservation[],
+  life: LifeModel,
+): { day: Day; lubeKm: number } | null {
+  const last = looks.at(-1);
+  const day = inOrder(history).at(-1)?.day;
+  return last && day !== undefined && isDoubtful(last, life) ? { day, lubeKm: last.lubeKm } : null;
 }

@@ -57,6 +57,13 @@ export function alertWords({ code, day, data }: Alert, regime: Regime, today: st
           'If you did ride, log it or give the odometer’s figure: the windows here are a guess until then.',
         ],
       };
+    case 'doubted-arrival':
+      return {
+        title: `How it arrived on ${dayWords(day, today)} can hardly be right`,
+        steps: [
+          `By what is recorded, one treatment lasted ${data.km} counted km. A treatment in between may be missing: record it with its own day. Until then that arrival counts for little.`,
+        ],
+      };
     case 'doubted-reading':
       return {
         title: `The reading of ${dayWords(day, today)} does not fit the others`,
