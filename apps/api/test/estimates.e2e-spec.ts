@@ -2,12 +2,14 @@ import type {
   Bike,
   Chain,
   ChainEstimate,
+  EstimationModel,
   PastEstimate,
   Rider,
   Usage,
   WorkshopSettings,
 } from '@halfpitch/contracts';
 import { EstimatesTasks } from '../src/estimates/estimates.tasks';
+import { RefitTasks } from '../src/estimates/refit.tasks';
 import { QueueService } from '../src/jobs/queue.service';
 import { BootedApp, bootApp, invited, ownerOfNewWorkshop } from './support/app';
 import { ownerQuery } from './support/owner-query';
@@ -175,4 +177,55 @@ it('is made anew for every chain when the owner changes what a kilometre counts 
   await owner.put('/api/workshop').send(settings).expect(200);
   await idle();
   expect((await estimateOf()).treatment.lubeKmUsed).toBe(200);
+});
+
+it('tells what the workshop has learned beside what it started from', async () => {
+  const modelOf = async (who = browser): Promise<EstimationModel> =>
+    (await who.get('/api/model').expect(200)).body;
+  const { browser: newOwner, session } = await ownerOfNewWorkshop(booted, 'West Wheel');
+  expect(await modelOf(newOwner)).toMatchObject({ learnedOn: null, rates: [], riding: { ownRiders: 0 } });
+
+  const west = await newRider(newOwner, 'Wes West');
+  const commuter = await newBike(newOwner, west.id);
+  const oiled = await newChain(newOwner, commuter, { regime: 'wet-oil' });
+  for (const days of [60, 40, 20])
+    await newRide(newOwner, commuter.id, { distanceM: 90_000, day: daysAgo(days) });
+  for (const days of [80, 50, 30, 10])
+    await newOwner
+      .post('/api/treatments')
+      .send({ chainId: oiled.id, day: daysAgo(days), kind: 'oil-wet', arrival: 'dry' })
+      .expect(201);
+  await booted.app.get(RefitTasks).refitWorkshop({ workshopId: session.workshop.id });
+
+  const learned = await modelOf(newOwner);
+  expect(learned.learnedOn! >= daysAgo(0)).toBe(true);
+  const life = learned.lives.find(({ kind }) => kind === 'oil-wet')!;
+  expect(life).toMatchObject({ start: 200, observations: 3 });
+  expect(life.median).toBeLessThan(150);
+  expect(life.low! < life.median && life.median < life.high!).toBe(true);
+  // One rider is too few to learn riding from, and nothing was measured.
+  expect(learned).toMatchObject({ rates: [], riding: { ownRiders: 0, shippedRiders: 16 } });
+});
+
+it('learns how riding goes on from a workshop with riders enough, between requests', async () => {
+  const { browser: newOwner, session } = await ownerOfNewWorkshop(booted, 'East Wheel');
+  const workshop = session.workshop.id;
+  for (let i = 0; i < 10; i++) {
+    const bike = await newBike(newOwner, (await newRider(newOwner, `Rider ${i}`)).id);
+    await ownerQuery(
+      booted,
+      `insert into ride (id, workshop_id, bike_id, day, distance_m, surface, weather, source, fingerprint)
+       select gen_random_uuid(), $1, $2, current_date - 400 + d, 12000 + 1000 * ((d * $3::int) % 30), 'road', 'dry',
+              'typed', d::text
+         from generate_series(1, 399) d where d % (2 + $3::int % 4) = 0`,
+      [workshop, bike.id, i + 1],
+    );
+  }
+  const refitting = booted.app.get(RefitTasks).refitWorkshop({ workshopId: workshop });
+  const since = Date.now();
+  await newOwner.get('/api/workshop').expect(200);
+  expect(Date.now() - since).toBeLessThan(1000);
+  await refitting;
+  const { riding } = (await newOwner.get('/api/model').expect(200)).body as EstimationModel;
+  expect(riding).toEqual({ ownRiders: 10, shippedRiders: 16 });
 });

@@ -6,6 +6,7 @@ export * from './chains';
 export * from './common';
 export * from './estimates';
 export * from './imports';
+export * from './model';
 export * from './permissions';
 export * from './readings';
 export * from './reminders';

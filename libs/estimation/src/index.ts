@@ -16,7 +16,7 @@ export type { LifeObservation } from './life/rider-life';
 export type { ChainLesson } from './chain-lesson';
 export { chainLesson } from './chain-lesson';
 export type { RiderLog } from './riding';
-export { defaultRidingModel, fitRidingModel, forecastRiding } from './riding';
+export { defaultRidingModel, fitRidingInSteps, fitRidingModel, forecastRiding } from './riding';
 export type { WindowScore } from './accuracy/score-windows';
 export { scoreWindows } from './accuracy/score-windows';
 export type { Seen } from './accuracy/window-outcome';

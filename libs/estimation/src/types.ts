@@ -218,9 +218,16 @@ export interface ElongationPriors {
   rate: Record<Regime, Record<BikeKind, { median: number; logSd: number; chains: number }>>;
 }
 
+/** Median life of a treatment, lube km, by so many looks on arrival; the standard error of its log where learned. */
+export interface LifeOfKind {
+  median: number;
+  observations: number;
+  logSe?: number;
+}
+
 /** Log-normal life in lube km by treatment kind; sd within a rider's cycles and between riders. */
 export interface LifeModel {
-  kinds: Record<Exclude<TreatmentKind, 'new-chain'>, { median: number; observations: number }>;
+  kinds: Record<Exclude<TreatmentKind, 'new-chain'>, LifeOfKind>;
   logSdWithin: number;
   logSdBetween: number;
 }

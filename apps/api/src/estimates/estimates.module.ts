@@ -5,6 +5,7 @@ import { ChainHistories } from './chain-histories';
 import { EstimatesController } from './estimates.controller';
 import { EstimatesService } from './estimates.service';
 import { EstimatesTasks } from './estimates.tasks';
+import { ModelController } from './model.controller';
 import { NightlyClock } from './nightly.clock';
 import { Estimator } from './estimator.service';
 import { RefitTasks } from './refit.tasks';
@@ -12,7 +13,7 @@ import { UsageService } from './usage.service';
 
 @Module({
   imports: [ChainsModule, WorkshopModule],
-  controllers: [EstimatesController],
+  controllers: [EstimatesController, ModelController],
   providers: [
     ChainHistories,
     EstimatesService,

@@ -1,12 +1,20 @@
 import { Injectable } from '@nestjs/common';
-import type { ChainEstimate, Page, PastEstimate, PastEstimateQuery } from '@halfpitch/contracts';
+import type {
+  ChainEstimate,
+  EstimationModel,
+  Page,
+  PastEstimate,
+  PastEstimateQuery,
+} from '@halfpitch/contracts';
 import { ChainsService } from '../chains/chains.service';
 import type { Actor } from '../common/actor';
 import { pageOf } from '../common/paging';
 import { ProblemException } from '../common/problems';
 import { TenantDb } from '../database/tenant-db';
+import { WorkshopService } from '../workshop/workshop.service';
 import { Estimate } from './estimate.entity';
-import { Estimator } from './estimator.service';
+import { Estimator, modelOf } from './estimator.service';
+import { toldModel } from './told-model';
 
 function toEstimate({ id, chainId, madeAt, detail }: Estimate): ChainEstimate {
   const { weekly, ...told } = detail;
@@ -23,6 +31,7 @@ export class EstimatesService {
   constructor(
     private readonly db: TenantDb,
     private readonly chains: ChainsService,
+    private readonly workshops: WorkshopService,
     private readonly estimator: Estimator,
   ) {}
 
@@ -47,6 +56,11 @@ export class EstimatesService {
       .where('estimate.chainId = :chainId', { chainId })
       .orderBy('estimate.madeOn', 'DESC');
     return pageOf(query, page, toPast);
+  }
+
+  /** What estimates are worked out with: what was learned, beside what it started from. */
+  async model({ workshopId }: Actor): Promise<EstimationModel> {
+    return toldModel(modelOf(await this.workshops.current(workshopId)));
   }
 
   /** The newest estimate that is kept. */

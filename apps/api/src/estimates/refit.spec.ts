@@ -1,4 +1,4 @@
-import { defaultFleetModel } from '@halfpitch/estimation';
+import { defaultFleetModel, defaultRidingModel } from '@halfpitch/estimation';
 import type { ChainLesson, LifeObservation } from '@halfpitch/estimation';
 import { refit, refitIsDue } from './refit';
 
@@ -20,9 +20,9 @@ it('learns a shorter life from chains that came in dry, and is the same when don
     ['a', chain(dry, dry)],
     ['b', chain(dry)],
   ]);
-  const learned = refit(null, lives, '2026-12-01');
+  const learned = refit(defaultRidingModel, lives, '2026-12-01');
   expect(learned.version).toBe('learned-2026-12-01');
   expect(learned.life.kinds['re-wax'].median).toBeLessThan(300);
   expect(learned.life.kinds['re-wax'].observations).toBe(3);
-  expect(refit(learned, lives, '2026-12-01')).toEqual(learned);
+  expect(refit(defaultRidingModel, lives, '2026-12-01')).toEqual(learned);
 });

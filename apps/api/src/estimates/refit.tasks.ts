@@ -9,6 +9,8 @@ import type { Tasks } from '../jobs/tasks';
 import { WorkshopService } from '../workshop/workshop.service';
 import { ChainHistories, LoadedChain } from './chain-histories';
 import { refit } from './refit';
+import { refitRiding } from './refit-riding';
+import { ridingLogs } from './riding-logs';
 
 const BATCH = 50;
 const FIRST = '00000000-0000-0000-0000-000000000000';
@@ -52,7 +54,8 @@ export class RefitTasks implements OnModuleInit {
         return next;
       });
     } while (chains.length === BATCH);
-    const model = refit(workshop.fleetModel, lessons, today);
+    const logs = await this.db.run({ workshopId }, () => ridingLogs(this.db.manager));
+    const model = refit(await refitRiding(logs), lessons, today);
     await this.db.run({ workshopId }, () =>
       this.db.manager.query('update workshop set fleet_model = $2 where id = $1', [
         workshopId,

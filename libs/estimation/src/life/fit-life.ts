@@ -47,7 +47,7 @@ export function fitLifeWithErrors(riders: readonly RiderLives[], start: LifeMode
   }, middle);
   const learned = kinds.map((kind, i) => [
     kind,
-    { median: Math.exp(at[i]!), observations: counts.get(kind)! },
+    { median: Math.exp(at[i]!), observations: counts.get(kind)!, logSe: standardErrors[i]! },
   ]);
   return {
     model: {

@@ -21,12 +21,12 @@ const LENGTH_POWER = -0.25;
 
 const round = (v: number) => Math.round(1e5 * v) / 1e5;
 
-/** Coefficients with the least CRPS over the outcomes, in at most so many steps of L-BFGS. */
-export function fitCoefficients(
+/** Coefficients with the least CRPS over the outcomes, in at most so many steps of L-BFGS, with a pause after each. */
+export function* fitCoefficients(
   outcomes: readonly Outcome[],
   iterations: number,
   shrink: Prior | undefined,
-): Coefficients {
+): Generator<void, Coefficients> {
   const standard = shrink?.prior ?? standardise(outcomes);
   const lessons = toLessons(outcomes, standard);
   const scaleSize = scaleLength(standard.mean.length);
@@ -41,7 +41,7 @@ export function fitCoefficients(
   });
   if (shrink) centre.set([...shrink.prior.location, ...shrink.prior.scale.slice(1), ...shrink.prior.z]);
   const start = shrink ? centre : freshStart(lessons, centre.length, zAt);
-  const x = minimise(crpsObjective(lessons, scaleSize, { centre, strength }), start, iterations);
+  const x = yield* minimise(crpsObjective(lessons, scaleSize, { centre, strength }), start, iterations);
   return {
     mean: standard.mean,
     sd: standard.sd,

@@ -16,6 +16,12 @@ export interface Ridge {
 
 export const MAX_LOG_DAYS = 9;
 
+// Taken once: looked up in the innermost loop they would cost more than they do.
+const { exp, max, min } = Math;
+const levels = Float64Array.from(LEVELS);
+const levelCount = levels.length;
+const mostLogDays = MAX_LOG_DAYS;
+
 /**
  * Mean pinball loss over LEVELS (half the CRPS), in days capped at each lesson's horizon, plus the ridge; x holds
  * the location's coefficients, the scale's without its intercept, and z.
@@ -36,14 +42,14 @@ export function crpsObjective(
       for (let i = 0; i < size; i++) location += row[i]! * x[i]!;
       let logScale = 0;
       for (let i = 1; i < scaleSize; i++) logScale += row[i]! * x[size + i - 1]!;
-      const scale = Math.exp(Math.min(Math.max(logScale, -3), 3));
+      const scale = exp(min(max(logScale, -3), 3));
       let gLocation = 0;
       let gScale = 0;
-      for (let l = 0; l < LEVELS.length; l++) {
+      for (let l = 0; l < levelCount; l++) {
         const z = x[zAt + l]!;
-        const level = LEVELS[l]!;
-        const q = Math.exp(Math.min(Math.max(location + scale * z, -2), MAX_LOG_DAYS));
-        const miss = days - Math.min(q, horizon);
+        const level = levels[l]!;
+        const q = exp(min(max(location + scale * z, -2), mostLogDays));
+        const miss = days - min(q, horizon);
         loss += weight * (miss >= 0 ? level * miss : (level - 1) * miss);
         if (q >= horizon || miss === 0) continue;
         const g = weight * q * (miss > 0 ? -level : 1 - level);

@@ -9,13 +9,16 @@ const FOLD_ITERATIONS = 60;
 const COVERAGE = 0.79;
 
 /** The width at which windows for riders left out of the fit hold as often as they say. */
-export function honestSpread(outcomes: readonly Outcome[], shrink: Prior | undefined): number {
+export function* honestSpread(
+  outcomes: readonly Outcome[],
+  shrink: Prior | undefined,
+): Generator<void, number> {
   const misses: number[] = [];
   for (let fold = 0; fold < FOLDS; fold++) {
     const taught = outcomes.filter(({ rider }) => rider % FOLDS !== fold);
     const left = outcomes.filter(({ rider }) => rider % FOLDS === fold);
     if (taught.length === 0 || left.length === 0) return 1;
-    const model = fitCoefficients(taught, FOLD_ITERATIONS, shrink);
+    const model = yield* fitCoefficients(taught, FOLD_ITERATIONS, shrink);
     for (const outcome of left) misses.push(neededSpread(outcome, model));
   }
   misses.sort((a, b) => a - b);

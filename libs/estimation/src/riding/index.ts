@@ -1,5 +1,5 @@
 export { defaultRidingModel } from './default-model';
-export { fitRidingModel } from './fit';
+export { fitRidingInSteps, fitRidingModel } from './fit';
 export { forecastRiding } from './forecast';
 export type { RiderLog } from './lessons';
 export { HORIZON_DAYS } from './model';

@@ -4,8 +4,15 @@ export type Objective = (x: Float64Array, gradient: Float64Array) => number;
 const MEMORY = 10;
 const dot = (a: Float64Array, b: Float64Array) => a.reduce((sum, x, i) => sum + x * b[i]!, 0);
 
-/** Minimises a function by L-BFGS with backtracking (Nocedal & Wright, Numerical Optimization, algorithms 7.4 and 3.1). */
-export function minimise(objective: Objective, start: Float64Array, iterations: number): Float64Array {
+/**
+ * Minimises a function by L-BFGS with backtracking (Nocedal & Wright, Numerical Optimization, algorithms 7.4 and 3.1);
+ * pauses after each step, so that who runs it can do something else in between.
+ */
+export function* minimise(
+  objective: Objective,
+  start: Float64Array,
+  iterations: number,
+): Generator<void, Float64Array> {
   let x = Float64Array.from(start);
   let gradient = new Float64Array(x.length);
   let value = objective(x, gradient);
@@ -30,6 +37,7 @@ export function minimise(objective: Objective, start: Float64Array, iterations: 
     if (sy > 1e-12) steps.push({ s, y, rho: 1 / sy });
     if (steps.length > MEMORY) steps.shift();
     [x, gradient, value] = [next, nextGradient, nextValue];
+    yield;
   }
   return x;
 }

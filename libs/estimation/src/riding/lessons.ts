@@ -21,46 +21,40 @@ export interface Outcome {
   horizon: number;
 }
 
-/** Every outcome that the logs show, at origins every `step` days from three weeks on. */
-export function outcomesOf(logs: readonly DailyLog[], season: readonly number[], step: number): Outcome[] {
-  return logs.flatMap((log, rider) => {
-    const outcomes: Outcome[] = [];
-    for (let o = 21; o < log.km.length - 1; o += step) {
-      if (log.rideDays[o]! < 4 || log.rideDays[o] === log.rideDays[Math.max(o - 60, 0)]) continue;
-      outcomes.push(...outcomesAt(log, o, rider, logView(log, o, season)));
-    }
-    return outcomes;
-  });
+/** Every outcome that a log shows, at origins every `step` days from three weeks on. */
+export function outcomesOf(log: DailyLog, rider: number, season: readonly number[], step: number): Outcome[] {
+  const outcomes: Outcome[] = [];
+  for (let o = 21; o < log.km.length - 1; o += step) {
+    if (log.rideDays[o]! < 4 || log.rideDays[o] === log.rideDays[Math.max(o - 60, 0)]) continue;
+    outcomes.push(...outcomesAt(log, o, rider, logView(log, o, season)));
+  }
+  return outcomes;
 }
 
-/** The same outcomes as riders would have met them who had only just begun to log. */
-export function newcomerOutcomes(logs: readonly DailyLog[], season: readonly number[]): Outcome[] {
-  return logs.flatMap((log, rider) => {
-    const outcomes: Outcome[] = [];
-    for (let i = 0, o = 7; o < log.km.length - 1; i++, o += NEWCOMER_STEP) {
-      const length = Math.min(NEWCOMER_LENGTHS[i % NEWCOMER_LENGTHS.length]!, o);
-      if (log.rideDays[o] === log.rideDays[o - length]) continue;
-      const seen = cutBefore(log, o - length);
-      outcomes.push(...outcomesAt(log, o, rider, logView(seen, length, season)));
-    }
-    return outcomes;
-  });
+/** The same outcomes as a rider would have met them who had only just begun to log. */
+export function newcomerOutcomes(log: DailyLog, rider: number, season: readonly number[]): Outcome[] {
+  const outcomes: Outcome[] = [];
+  for (let i = 0, o = 7; o < log.km.length - 1; i++, o += NEWCOMER_STEP) {
+    const length = Math.min(NEWCOMER_LENGTHS[i % NEWCOMER_LENGTHS.length]!, o);
+    if (log.rideDays[o] === log.rideDays[o - length]) continue;
+    const seen = cutBefore(log, o - length);
+    outcomes.push(...outcomesAt(log, o, rider, logView(seen, length, season)));
+  }
+  return outcomes;
 }
 
 /** What followed every fourth week, with a ride in the 60 days before it, where the log goes on for two years more. */
-export function longOutcomes(logs: readonly DailyLog[]): Outcome[] {
-  return logs.flatMap((log, rider) => {
-    const outcomes: Outcome[] = [];
-    for (let o = 1; o + HORIZON_DAYS < log.km.length; o += 28) {
-      if (log.rideDays[o] === log.rideDays[Math.max(o - 60, 0)]) continue;
-      for (const km of TAUGHT_KM) {
-        const reached = firstReaching(log.sums.subarray(o + 1), log.sums[o]! + km - 1e-9);
-        const days = Math.min(reached + 1, HORIZON_DAYS);
-        outcomes.push({ rider, features: [], km, days, horizon: HORIZON_DAYS });
-      }
+export function longOutcomes(log: DailyLog, rider: number): Outcome[] {
+  const outcomes: Outcome[] = [];
+  for (let o = 1; o + HORIZON_DAYS < log.km.length; o += 28) {
+    if (log.rideDays[o] === log.rideDays[Math.max(o - 60, 0)]) continue;
+    for (const km of TAUGHT_KM) {
+      const reached = firstReaching(log.sums.subarray(o + 1), log.sums[o]! + km - 1e-9);
+      const days = Math.min(reached + 1, HORIZON_DAYS);
+      outcomes.push({ rider, features: [], km, days, horizon: HORIZON_DAYS });
     }
-    return outcomes;
-  });
+  }
+  return outcomes;
 }
 
 /** How long each taught distance took from day index `o`, where the log goes on long enough to tell. */

@@ -5,6 +5,7 @@ import { useSession } from '../../app/session';
 import { Loaded } from '../../components/loaded';
 import { PageHeader } from '../../components/page-header';
 import { settingsQuery } from '../workshop/api/settings';
+import { modelQuery } from './api/model';
 import { HowDistance } from './how-distance';
 import { HowElongation } from './how-elongation';
 import { HowNarrow } from './how-narrow';
@@ -16,6 +17,7 @@ import { OwnNarrowing } from './own-narrowing';
 export function How() {
   const { workshop, riderId, role } = useSession();
   const query = useQuery(settingsQuery);
+  const model = useQuery(modelQuery);
   return (
     <>
       <PageHeader
@@ -26,9 +28,9 @@ export function How() {
         {(settings) => (
           <Stack gap="6" maxWidth="52rem">
             <HowDistance factors={settings.factors} />
-            <HowTreatment limits={settings.calendarLimitDays} />
-            <HowElongation />
-            <HowWindow policy={settings.reminderPolicy} />
+            <HowTreatment limits={settings.calendarLimitDays} model={model} />
+            <HowElongation model={model} />
+            <HowWindow policy={settings.reminderPolicy} model={model} />
             <HowNarrow />
             {riderId && <OwnNarrowing />}
             {role !== 'rider' && (
