@@ -20,7 +20,7 @@ export function LearnedLives({ model }: { model: EstimationModel }) {
       cell: ({ median, observations }) => (observations === 0 ? 'as the start' : km(median)),
     },
     {
-      head: 'Surely about',
+      head: '80 % span',
       numeric: true,
       cell: ({ low, high }) => (low === null || high === null ? '–' : `${km(low)} to ${km(high)}`),
     },
