@@ -41,7 +41,14 @@ export const reason = z.object({
 export type Reason = z.infer<typeof reason>;
 
 export const alert = z.object({
-  code: z.enum(['wet-ride-rust', 'quiet-log', 'past-limit', 'doubted-reading', 'doubted-arrival', 'treatment-spent']),
+  code: z.enum([
+    'wet-ride-rust',
+    'quiet-log',
+    'past-limit',
+    'doubted-reading',
+    'doubted-arrival',
+    'treatment-spent',
+  ]),
   day,
   data: z.record(z.string(), z.union([z.number(), z.string()])),
 });
