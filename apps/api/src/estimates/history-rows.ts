@@ -47,19 +47,24 @@ export interface RideGroup {
   rides: Ride[];
 }
 
-const words = <T extends string>(...list: T[]) => Object.fromEntries(list.map((word) => [word, word]));
-/** The same few words again and again: one string of each, not one for every ride. */
-const SURFACES = words<Ride['surface']>('road', 'gravel', 'mountain', 'indoor');
-const WEATHERS = words<Ride['weather']>('dry', 'damp', 'wet', 'mud', 'unknown');
+/** The order in which the database numbers them, from 1 on. */
+const SURFACES: readonly Ride['surface'][] = ['road', 'gravel', 'mountain', 'indoor'];
+const WEATHERS: readonly Ride['weather'][] = ['dry', 'damp', 'wet', 'mud', 'unknown'];
+const numbered = (column: string, all: readonly string[]) =>
+  `array_position('{${all.join()}}', ${column}::text)`;
 
-function parseRide(line: string): Ride {
-  const [day, metres, surface, weather] = line.split(' ');
-  return {
-    day: Number(day),
-    km: Number(metres) / 1000,
-    surface: SURFACES[surface!]!,
-    weather: WEATHERS[weather!]!,
-  };
+/** Rides from a JSON list of day, metres, surface and weather, one after the other: read many times faster than words. */
+function unpacked(packed: string): Ride[] {
+  const numbers = JSON.parse(`[${packed}]`) as number[];
+  const rides: Ride[] = [];
+  for (let i = 0; i < numbers.length; i += 4)
+    rides.push({
+      day: numbers[i]!,
+      km: numbers[i + 1]! / 1000,
+      surface: SURFACES[numbers[i + 2]! - 1]!,
+      weather: WEATHERS[numbers[i + 3]! - 1]!,
+    });
+  return rides;
 }
 
 /** All rides of these chains and bikes; they come packed, a row of the database's for each bike and chain. */
@@ -71,12 +76,12 @@ export async function rideGroups(
   const rows = await manager.query<(Omit<RideGroup, 'rides'> & { packed: string })[]>(
     `select packed.*, chain.retired_on is null as "inService" from (
        select bike_id as "bikeId", chain_id as "chainId",
-              string_agg(concat_ws(' ', ${dayCount('day')}, distance_m, surface, weather), ';') as packed
+              string_agg(concat_ws(',', ${dayCount('day')}, distance_m, ${numbered('surface', SURFACES)}, ${numbered('weather', WEATHERS)}), ',') as packed
          from ride where chain_id = any($1) or bike_id = any($2) group by bike_id, chain_id) packed
      left join chain on chain.id = packed."chainId"`,
     [chainIds, bikeIds],
   );
-  return rows.map(({ packed, ...group }) => ({ ...group, rides: packed.split(';').map(parseRide) }));
+  return rows.map(({ packed, ...group }) => ({ ...group, rides: unpacked(packed) }));
 }
 
 export type Of<T> = T & { chainId: string };

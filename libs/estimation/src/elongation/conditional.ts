@@ -1,4 +1,5 @@
 import type { Grid } from './grid';
+import { largest } from '../math/largest';
 
 /** The posterior as, for each run-in, a distribution function over log rate. */
 export interface Conditionals {
@@ -19,8 +20,9 @@ export interface Conditionals {
 export function conditionals({ rate, runIn, log }: Grid): Conditionals {
   const n = rate.nodes;
   const h = rate.step;
-  const top = log.reduce((most, x) => Math.max(most, x), -Infinity);
-  const density = log.map((x) => Math.exp(x - top));
+  const top = largest(log);
+  const density = new Float64Array(log.length);
+  for (let i = 0; i < log.length; i++) density[i] = Math.exp(log[i]! - top);
   const sums = new Float64Array(density.length);
   const mass = new Float64Array(runIn.nodes);
   for (let k = 0; k < runIn.nodes; k++) {

@@ -1,6 +1,7 @@
-import { fillRow, Gauge, spreadOf } from './gauge';
+import { carrying, fillRow, Gauge, spreadOf } from './gauge';
 import { Grid, nodesOf } from './grid';
 import { addAlong } from './reading-table';
+import { largest } from '../math/largest';
 
 /** Rates that carry less than this share of the likeliest one's weight say nothing of a reading. */
 const LIGHT = 1e-3;
@@ -17,7 +18,7 @@ function doubtsOf(gauge: Gauge, { rate, runIn, log }: Grid, chances: Map<string,
   const rates = nodesOf(rate);
   const runIns = nodesOf(runIn);
   const spread = spreadOf(gauge, runIns);
-  const top = log.reduce((most, x) => Math.max(most, x), -Infinity);
+  const top = largest(log);
   const row = new Float64Array(nodes);
   const along = new Float64Array(nodes);
   const sums = tables.map(() => 0);
@@ -29,12 +30,13 @@ function doubtsOf(gauge: Gauge, { rate, runIn, log }: Grid, chances: Map<string,
     const weights = runIns.map((_, j) => Math.exp(log[j * rate.nodes + i]! - top));
     if (Math.max(...weights) < LIGHT) continue;
     fillRow(gauge, rates[i]!, row);
+    const [from, to] = carrying(row);
     const perNode = new Float64Array(nodes);
     for (let j = 0; j < runIns.length; j++) {
       let own = 0;
-      for (let k = 0; k < nodes; k++) own += row[k]! * spread[j * nodes + k]!;
+      for (let k = from; k < to; k++) own += row[k]! * spread[j * nodes + k]!;
       const scale = own > 0 ? weights[j]! / own : 0;
-      for (let k = 0; k < nodes; k++) {
+      for (let k = from; k < to; k++) {
         const weight = scale * row[k]! * spread[j * nodes + k]!;
         perNode[k]! += weight;
         joint[j * nodes + k]! += weight;

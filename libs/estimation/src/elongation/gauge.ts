@@ -58,6 +58,15 @@ export function fillRow({ tables, first }: Gauge, rate: number, row: Float64Arra
   return exponentiate(row);
 }
 
+/** The nodes from..to (`to` left out) outside which a row of likelihoods carries nothing. */
+export function carrying(row: Float64Array): readonly [from: number, to: number] {
+  let from = 0;
+  let to = row.length;
+  while (from < to && row[from] === 0) from++;
+  while (to > from && row[to - 1] === 0) to--;
+  return [from, to];
+}
+
 /** spread[j · nodes + k] = density of node k when run-in is the j-th, baseline readings counted in, times the step. */
 export function spreadOf(
   { errors, first, step, nodes, baselines }: Gauge,

@@ -1,5 +1,6 @@
-import { fillRow, Gauge, spreadOf } from './gauge';
+import { carrying, fillRow, Gauge, spreadOf } from './gauge';
 import type { RatePrior, RunInPrior } from './priors';
+import { largest } from '../math/largest';
 import { unsettled } from './settled';
 
 /** An even grid over an interval. */
@@ -114,9 +115,10 @@ export function logLikelihood(
     const row = new Float64Array(gauge.nodes);
     for (let i = 0; i < rates.length; i++) {
       const scale = fillRow(gauge, rates[i]!, row);
+      const [from, to] = carrying(row);
       for (let j = 0; j < runIns.length; j++) {
         let sum = 0;
-        for (let k = 0, s = j * gauge.nodes; k < gauge.nodes; k++, s++) sum += row[k]! * spread[s]!;
+        for (let k = from, s = j * gauge.nodes + from; k < to; k++, s++) sum += row[k]! * spread[s]!;
         log[j * rates.length + i]! += scale + Math.log(Math.max(sum, 1e-300));
       }
     }
@@ -126,15 +128,17 @@ export function logLikelihood(
 
 /** The box around all nodes that carry mass, one step wider each way where the grid goes on. */
 function massOf({ rate, runIn, log }: Grid): Box {
-  const top = log.reduce((most, x) => Math.max(most, x), -Infinity);
+  const top = largest(log);
   const seen = { rate: [rate.nodes, -1], runIn: [runIn.nodes, -1] };
-  log.forEach((x, n) => {
-    if (x < top - NEGLIGIBLE) return;
+  for (let n = 0; n < log.length; n++) {
+    if (log[n]! < top - NEGLIGIBLE) continue;
     const i = n % rate.nodes;
     const k = (n - i) / rate.nodes;
-    seen.rate = [Math.min(seen.rate[0]!, i), Math.max(seen.rate[1]!, i)];
-    seen.runIn = [Math.min(seen.runIn[0]!, k), Math.max(seen.runIn[1]!, k)];
-  });
+    if (i < seen.rate[0]!) seen.rate[0] = i;
+    if (i > seen.rate[1]!) seen.rate[1] = i;
+    if (k < seen.runIn[0]!) seen.runIn[0] = k;
+    if (k > seen.runIn[1]!) seen.runIn[1] = k;
+  }
   const interval = ({ low, step, nodes }: Axis, [first, last]: number[]): Interval => [
     low + step * Math.max(first! - 1, 0),
     low + step * Math.min(last! + 1, nodes - 1),

@@ -1,6 +1,7 @@
 import type { ReadingMethod } from '../types';
 import { defaultElongationModel, ElongationModel } from './model';
 import type { ElongationPosterior } from './posterior';
+import { largest } from '../math/largest';
 
 const WORTH_TAKING = 0.85;
 
@@ -31,13 +32,13 @@ export function narrowing(
 
 /** Variance of today's elongation, and its squared correlation with the log of the wear km at the limit. */
 function momentsOf({ rate, runIn, log }: ElongationPosterior['grid'], wearKm: number, limitPct: number) {
-  const top = log.reduce((most, x) => Math.max(most, x), -Infinity);
+  const top = largest(log);
   let [w, e, ee, y, yy, ey] = [0, 0, 0, 0, 0, 0];
-  log.forEach((value, n) => {
+  for (let n = 0; n < log.length; n++) {
     const i = n % rate.nodes;
     const start = Math.exp(runIn.low + ((n - i) / rate.nodes) * runIn.step);
     const logRate = rate.low + i * rate.step;
-    const weight = Math.exp(value - top);
+    const weight = Math.exp(log[n]! - top);
     const now = start + (Math.exp(logRate) * wearKm) / 1000;
     const kmAtLimit = Math.log(Math.max(limitPct - start, 1e-3)) - logRate;
     w += weight;
@@ -46,7 +47,7 @@ function momentsOf({ rate, runIn, log }: ElongationPosterior['grid'], wearKm: nu
     y += weight * kmAtLimit;
     yy += weight * kmAtLimit * kmAtLimit;
     ey += weight * now * kmAtLimit;
-  });
+  }
   const elongationVariance = ee / w - (e / w) ** 2;
   const limitVariance = yy / w - (y / w) ** 2;
   if (!(elongationVariance > 1e-12) || !(limitVariance > 1e-12)) return null;

@@ -1,4 +1,5 @@
 import type { Grid } from './grid';
+import { largest } from '../math/largest';
 
 /** Sums over every other node may differ by this share of the whole. */
 const ALLOWED = 1e-3;
@@ -10,7 +11,7 @@ const APART = 1.2;
  * run-ins: likewise, or the bells over log rate of neighbouring run-ins stand so far apart that their sum would ripple.
  */
 export function unsettled({ rate, runIn, log }: Grid): { rates: boolean; runIns: boolean } {
-  const top = log.reduce((most, x) => Math.max(most, x), -Infinity);
+  const top = largest(log);
   let [total, columns, rows] = [0, 0, 0];
   let ripples = 0;
   let before = { sum: 0, mean: 0, sd: 0 };
