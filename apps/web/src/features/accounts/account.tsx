@@ -1,4 +1,5 @@
 import { Button, Flex, Separator, Stack } from '@chakra-ui/react';
+import { Link } from 'react-router-dom';
 import { useSession, useSignOut } from '../../app/session';
 import { LookTiles } from '../../components/look-tiles';
 import { PageHeader } from '../../components/page-header';
@@ -20,6 +21,9 @@ export function Account() {
         <LookTiles />
         {workshops.length > 1 && <WorkshopChoice />}
         <PasswordSettings />
+        <Button asChild variant="outline" alignSelf="flex-start">
+          <Link to="/account/tokens">Tokens for scripts</Link>
+        </Button>
         <Flex gap="3" wrap="wrap">
           <Button onClick={() => leave('here')} variant="outline">
             Sign out

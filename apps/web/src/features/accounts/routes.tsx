@@ -18,4 +18,5 @@ export const publicRoutes: RouteObject[] = [
 
 export const routes: RouteObject[] = [
   { path: 'account', lazy: async () => ({ Component: (await import('./account')).Account }) },
+  { path: 'account/tokens', lazy: async () => ({ Component: (await import('./tokens')).Tokens }) },
 ];
