@@ -18,6 +18,7 @@ const features = [
   'readings',
   'treatments',
   'estimates',
+  'plans',
   'reminders',
   'workload',
   'accuracy',

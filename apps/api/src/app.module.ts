@@ -20,6 +20,7 @@ import { WorkloadModule } from './workload/workload.module';
 import { HealthModule } from './health/health.module';
 import { JobsModule } from './jobs/jobs.module';
 import { MailModule } from './mail/mail.module';
+import { PlansModule } from './plans/plans.module';
 import { ReadingsModule } from './readings/readings.module';
 import { RidersModule } from './riders/riders.module';
 import { RidesModule } from './rides/rides.module';
@@ -43,6 +44,7 @@ import { WorkshopModule } from './workshop/workshop.module';
     ReadingsModule,
     TreatmentsModule,
     EstimatesModule,
+    PlansModule,
     RemindersModule,
     WorkloadModule,
     AccuracyModule,

@@ -8,6 +8,7 @@ export * from './estimates';
 export * from './imports';
 export * from './model';
 export * from './permissions';
+export * from './plans';
 export * from './readings';
 export * from './reminders';
 export * from './riders';

@@ -21,6 +21,8 @@ export type { WindowScore } from './accuracy/score-windows';
 export { scoreWindows } from './accuracy/score-windows';
 export type { Seen } from './accuracy/window-outcome';
 export { windowOutcome } from './accuracy/window-outcome';
+export type { KeptChances } from './workload/chance-before';
+export { chanceBefore } from './workload/chance-before';
 export type { Answer } from './workload/come-chance';
 export { comeChance } from './workload/come-chance';
 export { poissonBinomial } from './workload/poisson-binomial';

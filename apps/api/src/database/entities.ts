@@ -8,6 +8,7 @@ import { Chain } from '../chains/chain.entity';
 import { Fitting } from '../chains/fitting.entity';
 import { Estimate } from '../estimates/estimate.entity';
 import { Mail } from '../mail/mail.entity';
+import { PlannedRiding } from '../plans/planned-riding.entity';
 import { Reading } from '../readings/reading.entity';
 import { Reminder } from '../reminders/reminder.entity';
 import { Rider } from '../riders/rider.entity';
@@ -27,6 +28,7 @@ export const entities = [
   Mail,
   Member,
   OdometerReading,
+  PlannedRiding,
   Reading,
   Reminder,
   Ride,

@@ -6,6 +6,7 @@ import {
   ChainRow,
   chainRows,
   checkpointRows,
+  plannedRows,
   previousRows,
   readingRows,
   RideGroup,
@@ -48,6 +49,7 @@ export class ChainHistories {
     const treatments = groupBy(await treatmentRows(manager, ids), ({ chainId }) => chainId);
     const readings = groupBy(await readingRows(manager, ids), ({ chainId }) => chainId);
     const checkpoints = groupBy(await checkpointRows(manager, bikeIds), ({ bikeId }) => bikeId);
+    const planned = groupBy(await plannedRows(manager, bikeIds, today), ({ bikeId }) => bikeId);
     const previous = groupBy(await previousRows(manager, ids, today), ({ chainId }) => chainId);
     return rows.map((row) => ({
       row,
@@ -63,7 +65,7 @@ export class ChainHistories {
         shareOfRiding: shareOfRiding(row, byBike.get(row.bikeId ?? '') ?? [], dayOf(today)),
         readings: readings.get(row.id) ?? [],
         treatments: treatments.get(row.id) ?? [],
-        planned: [],
+        planned: planned.get(row.bikeId ?? '') ?? [],
         checkpoints: sinceFitted(checkpoints.get(row.bikeId ?? '') ?? [], row.bikeSince),
         calendarLimitDays: settings.calendarLimitDays,
         previous: previous.get(row.id)?.[0],

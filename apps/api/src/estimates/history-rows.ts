@@ -1,5 +1,12 @@
 import type { BikeKind, Regime } from '@halfpitch/contracts';
-import type { Checkpoint, PreviousEstimate, Reading, Ride, Treatment } from '@halfpitch/estimation';
+import type {
+  Checkpoint,
+  PlannedRiding,
+  PreviousEstimate,
+  Reading,
+  Ride,
+  Treatment,
+} from '@halfpitch/estimation';
 import type { EntityManager } from 'typeorm';
 
 /** Days as the estimation library counts them. */
@@ -124,6 +131,20 @@ export function checkpointRows(
     `select bike_id as "bikeId", ${dayCount('day')} as day, odometer_m / 1000.0::float8 as "odometerKm"
        from odometer_reading where bike_id = any($1) order by day`,
     [bikeIds],
+  );
+}
+
+/** Planned riding of these bikes that is not over yet. */
+export function plannedRows(
+  manager: EntityManager,
+  bikeIds: string[],
+  today: string,
+): Promise<(PlannedRiding & { bikeId: string })[]> {
+  return manager.query(
+    `select bike_id as "bikeId", ${dayCount('from_day')} as "from", ${dayCount('to_day')} as "to",
+            distance_m / 1000.0::float8 as km
+       from planned_riding where bike_id = any($1) and to_day > $2 order by from_day, id`,
+    [bikeIds, today],
   );
 }
 

@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { Regime, Workload } from '@halfpitch/contracts';
+import type { KeptChances } from '@halfpitch/estimation';
 import { comeChance, dayOf, isoDay, waitingVisits, withRenewals } from '@halfpitch/estimation';
 import { Clock } from '../common/clock';
 import { TenantDb } from '../database/tenant-db';
@@ -8,7 +9,7 @@ import type { StoredSettings } from '../workshop/workshop.entity';
 import { WorkshopService } from '../workshop/workshop.service';
 import { answers, summary } from './answers';
 import { band, counts, map, plus } from './counts';
-import { ChainChance, chainsOfWeek, KeptChances, mondayOf, shiftWeeks } from './week-chances';
+import { ChainChance, chainsOfWeek, mondayOf, shiftWeeks } from './week-chances';
 
 const WEEKS = 12;
 

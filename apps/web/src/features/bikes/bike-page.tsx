@@ -15,6 +15,7 @@ import { ChainGlance } from '../chains/chain-glance';
 import { speedWords } from '../chains/chain-words';
 import { useChanged } from '../chains/follow-estimate';
 import { SwapChain } from '../chains/swap-chain';
+import { PlansPanel } from '../plans/plans-panel';
 import { RideList } from '../rides/ride-list';
 import { bikeQuery } from './api/bike';
 import { removeBike } from './api/remove-bike';
@@ -107,6 +108,7 @@ function BikeView({ bike }: { bike: Bike }) {
       <Stack gap="6">
         {bike.notes && <Text whiteSpace="pre-line">{bike.notes}</Text>}
         <FittedChain bike={bike} />
+        <PlansPanel bikeId={bike.id} />
         <OdometerPanel bikeId={bike.id} chainId={bike.fittedChainId} />
         <Panel title="Rides">
           <RideList filter={{ bikeId: bike.id }} />
