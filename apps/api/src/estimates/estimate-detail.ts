@@ -5,7 +5,11 @@ import type { EstimateDetail } from './estimate.entity';
 const dayOrNull = (day: number | null) => (day === null ? null : isoDay(day));
 
 /** Kept figures have six significant digits: more than any of them deserves, and half the room. */
-const brief = (value: number) => Number(value.toPrecision(6));
+function brief(value: number): number {
+  if (value === 0) return 0;
+  const scale = 10 ** (5 - Math.floor(Math.log10(Math.abs(value))));
+  return Number.isFinite(scale) ? Math.round(value * scale) / scale : 0;
+}
 /** A chance, free of what rounding adds beyond 0 and 1. */
 const chance = (value: number) => brief(Math.min(Math.max(value, 0), 1));
 const band = ({ p10, p50, p90 }: { p10: number; p50: number; p90: number }) => ({

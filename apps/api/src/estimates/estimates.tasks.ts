@@ -5,10 +5,14 @@ import { QueueService } from '../jobs/queue.service';
 import type { Tasks } from '../jobs/tasks';
 import { WorkshopService } from '../workshop/workshop.service';
 import { Estimator } from './estimator.service';
+import { inTurn } from './in-turn';
 import { refitIsDue } from './refit';
 
 /** Chains loaded, estimated and kept in one transaction: bounds the memory, what a crash undoes, and how long they are locked. */
 const BATCH = 50;
+
+/** PostgreSQL reads the next batch while this one is worked out. */
+const LANES = 2;
 
 @Injectable()
 export class EstimatesTasks implements OnModuleInit {
@@ -44,14 +48,12 @@ export class EstimatesTasks implements OnModuleInit {
       const { timeZone } = await this.workshops.current(workshopId);
       return this.clock.today(timeZone);
     });
-    let ids: string[] = [];
-    do {
-      ids = await this.db.run({ workshopId }, async () => {
-        const next = await this.nextBatch(today, since, ids.at(-1));
-        if (next.length > 0) await this.estimator.estimate(workshopId, next);
-        return next;
-      });
-    } while (ids.length === BATCH);
+    const next = inTurn((after) => this.db.run({ workshopId }, () => this.nextBatch(today, since, after)));
+    const lane = async () => {
+      for (let ids = await next(); ids.length > 0; ids = await next())
+        await this.db.run({ workshopId }, () => this.estimator.estimate(workshopId, ids));
+    };
+    await Promise.all(Array.from({ length: LANES }, lane));
     await this.db.run({ workshopId }, () => this.finish(workshopId, today));
     await this.db.run({ workshopId }, () => this.askForRefit(workshopId, today));
   }
