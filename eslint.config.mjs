@@ -19,6 +19,7 @@ const features = [
   'treatments',
   'estimates',
   'plans',
+  'calendar',
   'reminders',
   'workload',
   'accuracy',

@@ -5,6 +5,7 @@ import { ScheduleModule } from '@nestjs/schedule';
 import { AccuracyModule } from './accuracy/accuracy.module';
 import { AccountsModule } from './accounts/accounts.module';
 import { BikesModule } from './bikes/bikes.module';
+import { CalendarModule } from './calendar/calendar.module';
 import { ChainsModule } from './chains/chains.module';
 import { CommonModule } from './common/common.module';
 import { PermitGuard } from './common/permit.guard';
@@ -45,6 +46,7 @@ import { WorkshopModule } from './workshop/workshop.module';
     TreatmentsModule,
     EstimatesModule,
     PlansModule,
+    CalendarModule,
     RemindersModule,
     WorkloadModule,
     AccuracyModule,

@@ -2,6 +2,7 @@ export * from './accuracy';
 export * from './accounts';
 export * from './api-tokens';
 export * from './bikes';
+export * from './calendar';
 export * from './chains';
 export * from './common';
 export * from './estimates';

@@ -37,7 +37,7 @@ import { TokensService } from './tokens.service';
     Throttle,
     TokensService,
   ],
-  exports: [InvitationsService],
+  exports: [ActorsService, InvitationsService],
 })
 export class AccountsModule implements NestModule {
   configure(consumer: MiddlewareConsumer): void {

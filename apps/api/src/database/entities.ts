@@ -4,6 +4,7 @@ import { ApiToken } from '../accounts/api-token.entity';
 import { Member } from '../accounts/member.entity';
 import { Bike } from '../bikes/bike.entity';
 import { OdometerReading } from '../bikes/odometer-reading.entity';
+import { CalendarFeed } from '../calendar/calendar-feed.entity';
 import { Chain } from '../chains/chain.entity';
 import { Fitting } from '../chains/fitting.entity';
 import { Estimate } from '../estimates/estimate.entity';
@@ -22,6 +23,7 @@ export const entities = [
   AccountToken,
   ApiToken,
   Bike,
+  CalendarFeed,
   Chain,
   Estimate,
   Fitting,

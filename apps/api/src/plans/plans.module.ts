@@ -3,5 +3,10 @@ import { BikesModule } from '../bikes/bikes.module';
 import { PlansController } from './plans.controller';
 import { PlansService } from './plans.service';
 
-@Module({ imports: [BikesModule], controllers: [PlansController], providers: [PlansService] })
+@Module({
+  imports: [BikesModule],
+  controllers: [PlansController],
+  providers: [PlansService],
+  exports: [PlansService],
+})
 export class PlansModule {}

@@ -6,6 +6,7 @@ import { ImportChoices1764500000005 } from './1764500000005-import-choices';
 import { PlannedRiding1764500000008 } from './1764500000008-planned-riding';
 import { RemovedRides1764500000009 } from './1764500000009-removed-rides';
 import { ApiTokens1764500000011 } from './1764500000011-api-tokens';
+import { CalendarFeeds1764500000015 } from './1764500000015-calendar-feeds';
 
 export const migrations = [
   Accounts1764500000001,
@@ -16,4 +17,5 @@ export const migrations = [
   PlannedRiding1764500000008,
   RemovedRides1764500000009,
   ApiTokens1764500000011,
+  CalendarFeeds1764500000015,
 ];
