@@ -10,7 +10,7 @@ import { WorkshopChoice } from './workshop-choice';
 
 /** One's own settings. */
 export function Account() {
-  const { account, workshops } = useSession();
+  const { account, riderId, workshops } = useSession();
   const signOut = useSignOut();
   const leave = (where: 'here' | 'everywhere') => void signOut(where).catch(toastError);
   return (
@@ -21,6 +21,11 @@ export function Account() {
         <LookTiles />
         {workshops.length > 1 && <WorkshopChoice />}
         <PasswordSettings />
+        {riderId && (
+          <Button asChild variant="outline" alignSelf="flex-start">
+            <Link to="/account/calendar">In your calendar</Link>
+          </Button>
+        )}
         <Button asChild variant="outline" alignSelf="flex-start">
           <Link to="/account/tokens">Tokens for scripts</Link>
         </Button>
