@@ -7,7 +7,11 @@ const here = (path: string) => fileURLToPath(new URL(path, import.meta.url));
 export default defineConfig({
   root: here('.'),
   plugins: [react()],
-  resolve: { tsconfigPaths: true },
+  resolve: {
+    tsconfigPaths: true,
+    // The same parser, made for where there is no Buffer.
+    alias: [{ find: /^csv-parse\/sync$/, replacement: 'csv-parse/browser/esm/sync' }],
+  },
   build: {
     outDir: here('../../dist/apps/web'),
     emptyOutDir: true,
@@ -17,8 +21,8 @@ export default defineConfig({
     rolldownOptions: {
       treeshake: {
         manualPureFunctions: ['defineConfig', 'defineSlotRecipe', 'defineRecipe'],
-        // A page takes from the contracts what it names, not what the barrel lists.
-        moduleSideEffects: [{ test: /libs[\\/]contracts[\\/]/, sideEffects: false }],
+        // A page takes from a library what it names, not what the barrel lists.
+        moduleSideEffects: [{ test: /libs[\\/](contracts|ride-files)[\\/]/, sideEffects: false }],
       },
     },
   },

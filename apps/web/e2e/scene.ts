@@ -16,12 +16,13 @@ export function rideLog(weeks: number): string {
   return `${lines.join('\n')}\n`;
 }
 
-/** Gives the import page a file as a rider would, and waits for its outcome. */
+/** Gives the import page a table as a rider would, finds it read well, and waits for its outcome. */
 export async function importFile(page: Page, name: string, content: string, outcome: RegExp): Promise<void> {
   await page.goto('/import');
   await page
     .locator('input[type=file]')
     .setInputFiles({ name, mimeType: 'text/csv', buffer: Buffer.from(content) });
+  await page.getByRole('button', { name: /^Add [\d,]+ rides?$/ }).click();
   await expect(page.getByText(outcome)).toBeVisible({ timeout: 30_000 });
 }
 

@@ -4,6 +4,7 @@ export * from './options';
 export { readRideFile, readWholeRideFile } from './read-ride-file';
 export { summariseFile, type FileSummary } from './summary';
 export { inspectCsv, readCsv } from './csv/read-csv';
+export type { KnownMatching } from './csv/guess';
 export { rideFingerprint, fingerprintAll } from './fingerprint';
 export { sameRide } from './same-ride';
 export { UnreadableFile } from './unreadable';

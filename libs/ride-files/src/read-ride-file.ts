@@ -53,11 +53,17 @@ export async function readWholeRideFile(
   return results;
 }
 
+const MATCH_FIRST =
+  'The table leaves open how its columns are meant: unpack it, send it by itself and match them.';
+
 /** Reads a file that came out of an archive: an archive within is refused. */
 async function readPacked(name: string, bytes: Uint8Array, options: ReadOptions): Promise<RideFileResult[]> {
   const content = contentOf(bytes);
   if (content !== 'zip' && content !== 'gzip') {
-    return readOne(name, bytes, options).catch((error: unknown) => [unreadable(name, sentence(error))]);
+    const results = await readOne(name, bytes, options).catch((error: unknown) => [
+      unreadable(name, sentence(error)),
+    ]);
+    return results.map((one) => (one.needsMatching ? { ...one, message: MATCH_FIRST } : one));
   }
   return [
     unreadable(name, 'An archive inside an archive is not opened: unpack it first and send what is in it.'),

@@ -4,7 +4,7 @@ import type { FileSurface } from './types';
 const riding = /\b(?:\w*cycl\w*|\w*bik\w*|ride|riding|v[eé]lo|mtb|gravel|spin(?:ning)?)\b/i;
 const notBicycle = /motor|horse|snow ?bik|transition/i;
 const others =
-  /\b(?:run|jog|walk|hik|trek|swim|row|paddl|kayak|canoe|surf|sail|ski|skat|snow|climb|yoga|golf|tennis|gym|fitness|strength|driv|motor|horse|fly|transition|workout|elliptical)\w*/i;
+  /\b(?:run|jog|walk|hik|trek|swim|row|paddl|kayak|canoe|surf|sail|ski|skat|snow|climb|yoga|golf|tennis|gym|fitness|strength|driv|motor|horse|fly|transition|workout|elliptical|football|soccer|basketball|volleyball|handball|badminton|squash|danc|pilates|stretch|weights?\b|stair)\w*/i;
 const indoors = /\b(?:indoor|virtual|trainer|spin)/i;
 
 /** 'fitnessEquipment/indoorRowing' gives 'fitness equipment, indoor rowing'; the empty word 'generic' is dropped. */

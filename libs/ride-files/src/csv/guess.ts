@@ -7,29 +7,33 @@ import { guessShortClock } from './short-clock';
 import type { CsvRow } from './table';
 import { looksLikeNumber, parseDistance, parseNumber, unitless } from './values';
 
+/** What the rider has said already; everything else is guessed. Columns, once given, are all that count. */
+export type KnownMatching = Partial<CsvMatching>;
+
 /** Best guess at a matching, and what only the rider can decide. */
 export function guessMatching(
   rows: CsvRow[],
-  delimiter: Delimiter,
+  known: KnownMatching & { delimiter: Delimiter },
 ): { matching: CsvMatching; questions: CsvQuestion[] } {
-  const hasHeader = guessHeader(rows);
+  const hasHeader = known.hasHeader ?? guessHeader(rows);
   const header = hasHeader ? (rows[0]?.cells ?? []) : [];
   const body = hasHeader ? rows.slice(1) : rows;
-  const columns = guessColumns(header, body);
+  const columns = { ...(known.columns ?? guessColumns(header, body)) };
   const distances = cellsOf(body, columns.distance);
   const dates = cellsOf(body, columns.date).filter(looksLikeDate);
-  const orders = possibleOrders(dates);
-  const { decimal, sure } = guessDecimal(distances);
-  const unit = headerDistanceUnit(header[columns.distance ?? -1] ?? '') ?? cellUnit(distances);
+  const orders = known.dateOrder ? [known.dateOrder] : possibleOrders(dates);
+  const { decimal, sure } = known.decimal ? { decimal: known.decimal, sure: true } : guessDecimal(distances);
+  const unit =
+    known.distanceUnit ?? headerDistanceUnit(header[columns.distance ?? -1] ?? '') ?? cellUnit(distances);
   const distanceUnit = unit ?? 'km';
-  const shortClock = guessShortClock(
+  const guessedClock = guessShortClock(
     cellsOf(body, columns.movingTime).map((time, i) => ({
       time,
       distanceM: parseDistance(distances[i] ?? '', distanceUnit, decimal),
     })),
   );
-  if (shortClock === null) moveToStart(columns);
-  const timeUnit = headerTimeUnit(header[columns.movingTime ?? -1] ?? '');
+  if (guessedClock === null && known.columns === undefined) moveToStart(columns);
+  const timeUnit = known.timeUnit ?? headerTimeUnit(header[columns.movingTime ?? -1] ?? '');
   const questions = questionsAbout(columns, {
     header,
     ambiguousDate: orders.length > 1 ? dates[0] : undefined,
@@ -38,13 +42,13 @@ export function guessMatching(
     bareTimes: timeUnit === null && cellsOf(body, columns.movingTime).some(looksLikeNumber),
   });
   const matching: CsvMatching = {
-    delimiter,
+    delimiter: known.delimiter,
     hasHeader,
     decimal,
     dateOrder: orders[0] ?? 'ymd',
     distanceUnit,
     timeUnit: timeUnit ?? 'min',
-    shortClock: shortClock ?? 'h:m',
+    shortClock: known.shortClock ?? guessedClock ?? 'h:m',
     columns,
   };
   return { matching, questions };

@@ -145,3 +145,17 @@ it('asks for the date when the column of that name holds none', () => {
   const { questions } = inspectCsv(bytes('date,km', 'Saturday,12'));
   expect(questions.map(({ about }) => about)).toEqual(['date']);
 });
+
+it('guesses anew what the rider has not said', () => {
+  const file = bytes('Tag;weit;Sport', '03.04.2025;12,5;Rad', '05.04.2025;1.000,5;Rad');
+  expect(inspectCsv(file).questions.map(({ about }) => about)).toEqual(['distance', 'dateOrder']);
+  const told = inspectCsv(file, { columns: { date: 0, distance: 1 } });
+  expect(told.matching.decimal).toBe(',');
+  expect(told.questions.map(({ about }) => about)).toEqual(['dateOrder', 'distanceUnit']);
+  const all = inspectCsv(file, { columns: { date: 0, distance: 1 }, dateOrder: 'dmy', distanceUnit: 'km' });
+  expect(all.questions).toEqual([]);
+  expect(all.rides.map(({ date, distanceM }) => [date, distanceM])).toEqual([
+    ['2025-04-03', 12_500],
+    ['2025-04-05', 1_000_500],
+  ]);
+});

@@ -1,5 +1,5 @@
 import { guessDelimiter } from './delimiter';
-import { guessMatching } from './guess';
+import { guessMatching, type KnownMatching } from './guess';
 import type { CsvInspection, CsvMatching, CsvQuestion, CsvReading } from './matching';
 import { readRow } from './read-row';
 import { csvText, MAX_CSV_ROWS, splitRows, type CsvRow } from './table';
@@ -15,15 +15,15 @@ export interface ExaminedCsv extends CsvReading {
   body: CsvRow[];
 }
 
-/** Reads a CSV; throws UnreadableFile with a plain sentence when it holds no table. */
-export function examineCsv(bytes: Uint8Array, given?: CsvMatching): ExaminedCsv {
+/** Reads a CSV, guessing what was not said; throws UnreadableFile with a plain sentence when it holds no table. */
+export function examineCsv(bytes: Uint8Array, given: KnownMatching = {}): ExaminedCsv {
   const text = csvText(bytes);
-  const delimiter = given?.delimiter ?? guessDelimiter(text);
+  const delimiter = given.delimiter ?? guessDelimiter(text);
   const rows = splitRows(text, delimiter);
   if (rows.length > MAX_CSV_ROWS) {
     throw new UnreadableFile(`The table has more than ${MAX_CSV_ROWS} rows: cut it into smaller files.`);
   }
-  const { matching, questions } = given ? { matching: given, questions: [] } : guessMatching(rows, delimiter);
+  const { matching, questions } = guessMatching(rows, { ...given, delimiter });
   const header = matching.hasHeader ? (rows[0]?.cells ?? []) : [];
   const body = matching.hasHeader ? rows.slice(1) : rows;
   if (body.length === 0)
@@ -33,10 +33,10 @@ export function examineCsv(bytes: Uint8Array, given?: CsvMatching): ExaminedCsv 
 
 /**
  * Looks at a CSV without saving anything: guessed matching, what must be asked, a preview and the problems.
- * Given a matching, it shows what that would make of the file.
+ * Given a matching, or what the rider has said of it so far, it shows what that would make of the file.
  * @throws UnreadableFile with a plain sentence
  */
-export function inspectCsv(bytes: Uint8Array, given?: CsvMatching): CsvInspection {
+export function inspectCsv(bytes: Uint8Array, given?: KnownMatching): CsvInspection {
   const { matching, questions, header, body, rides, problems } = examineCsv(bytes, given);
   const preview = body.slice(0, PREVIEW_ROWS);
   const last = preview.at(-1)?.line ?? 0;

@@ -12,6 +12,9 @@ import { surfaceWords, weatherWords } from '../../components/trade-words';
 import { useWhoseBikes } from '../bikes/use-whose-bikes';
 import { optionsOf } from '../chains/options';
 import { ImportList } from './import-list';
+import { SentBefore } from './sent-before';
+import { UnsentNotice } from './unsent-notice';
+import { useUnsent } from './use-unsent';
 import { useUploads } from './use-uploads';
 import { usualSurface } from './usual-rides';
 
@@ -24,9 +27,11 @@ function Importer({ bikes, first }: { bikes: Bike[]; first: Bike }) {
   const surface = ground ?? usualSurface(bike, []);
   const [weather, setWeather] = useState<Weather>('unknown');
   const [anySport, setAnySport] = useState(false);
-  const { uploads, add, retry } = useUploads();
+  const { uploads, add, send, match, leave } = useUploads();
+  const { remaining, forget } = useUnsent(first.riderId, uploads);
   return (
     <Stack gap="6">
+      <UnsentNotice names={remaining} onForget={forget} />
       {bikes.length > 1 && (
         <Tiles
           name="bike"
@@ -65,13 +70,14 @@ function Importer({ bikes, first }: { bikes: Bike[]; first: Bike }) {
       <FileDrop
         label="Drop ride files here, or choose them"
         help={`GPX, TCX, FIT and CSV, also packed as .zip or .gz; each up to ${MEGABYTES} MB`}
-        accept=".gpx,.tcx,.fit,.csv,.zip,.gz"
+        accept=".gpx,.tcx,.fit,.csv,.tsv,.txt,.zip,.gz"
         multiple
         onFiles={(files) =>
           add(files, { bikeId, surface, weather, otherSports: anySport ? 'take' : 'leave' })
         }
       />
-      <ImportList uploads={uploads} onRetry={retry} />
+      <ImportList uploads={uploads} onSend={send} onMatch={match} onLeave={leave} />
+      <SentBefore riderId={first.riderId} uploads={uploads} />
     </Stack>
   );
 }

@@ -1,74 +1,78 @@
-import { Box, Button, Stack, Text } from '@chakra-ui/react';
-import { errorSentence } from '../../app/api-problem';
-import type { RideImport } from '@halfpitch/contracts';
-import { useQuery } from '@tanstack/react-query';
-import { useEffect } from 'react';
-import { useChanged } from '../chains/follow-estimate';
-import { bikeQuery } from '../bikes/api/bike';
-import { importQuery } from './api/import';
+import { Box, Button, Skeleton, Stack, Text } from '@chakra-ui/react';
+import type { CsvMatching } from '@halfpitch/ride-files';
+import { lazy, Suspense } from 'react';
 import { ImportBar } from './import-bar';
-import { ImportOutcome } from './import-outcome';
-import type { Upload } from './use-uploads';
+import { ImportState } from './import-state';
+import { ImportSum } from './import-sum';
+import { canRetry } from './upload';
+import type { Upload } from './upload';
 
-const isThrough = (found: RideImport) => found.state === 'done' || found.state === 'failed';
+const TableMatching = lazy(() => import('./table-matching'));
 
-/** A file on the server: how far it is read, then what came of it. */
-function Reading({ upload, importId }: { upload: Upload; importId: string }) {
-  const { data, error } = useQuery(importQuery(importId));
-  const { data: bike } = useQuery(bikeQuery(upload.choice.bikeId));
-  const chainId = bike?.fittedChainId ?? null;
-  const changed = useChanged();
-  const added = data && isThrough(data) ? data.added : 0;
-  useEffect(() => {
-    if (added > 0) changed(chainId);
-  }, [added, chainId, changed]);
-  if (!data)
-    return error ? (
-      <Text color="fg.error">{errorSentence(error)}</Text>
-    ) : (
-      <ImportBar doing="Waiting" share={1} />
-    );
-  if (isThrough(data)) return <ImportOutcome found={data} />;
-  const seen = data.added + data.alreadyThere + data.refused;
-  return <ImportBar doing="Reading" share={data.total > 0 ? seen / data.total : 0} />;
+interface ImportListProps {
+  uploads: readonly Upload[];
+  /** Sends a file again, maybe with other choices. */
+  onSend: (upload: Upload) => void;
+  onMatch: (upload: Upload, matching: CsvMatching) => void;
+  onLeave: (upload: Upload) => void;
 }
 
-function Progress({ upload, onRetry }: { upload: Upload; onRetry: (upload: Upload) => void }) {
-  if (upload.trouble !== null)
+function Progress({
+  upload,
+  onSend,
+  onMatch,
+  onLeave,
+}: { upload: Upload } & Omit<ImportListProps, 'uploads'>) {
+  const { trouble, table, importId, choice, sent } = upload;
+  if (trouble !== null)
     return (
       <Stack gap="2" align="flex-start">
         <Text color="fg.error" fontWeight="semibold">
-          {upload.trouble}
+          {trouble}
         </Text>
-        {upload.file.size > 0 && (
-          <Button size="sm" variant="outline" onClick={() => onRetry(upload)}>
+        {canRetry(upload) && (
+          <Button size="sm" variant="outline" onClick={() => onSend(upload)}>
             Send it again
           </Button>
         )}
       </Stack>
     );
-  if (upload.importId === null) return <ImportBar doing="Sending" share={upload.sent} />;
-  return <Reading upload={upload} importId={upload.importId} />;
+  if (table !== null)
+    return (
+      <Suspense fallback={<Skeleton height="12rem" />}>
+        <TableMatching
+          bytes={table}
+          onAdd={(matching) => onMatch(upload, matching)}
+          onLeave={() => onLeave(upload)}
+        />
+      </Suspense>
+    );
+  if (importId === null) return <ImportBar doing="Sending" share={sent} />;
+  const take = { ...upload, importId: null, choice: { ...choice, otherSports: 'take' as const } };
+  return (
+    <ImportState
+      importId={importId}
+      bikeId={choice.bikeId}
+      onTake={choice.otherSports === 'take' || choice.matching ? undefined : () => onSend(take)}
+    />
+  );
 }
 
 /** File by file: how far it is and what came of it. */
-export function ImportList({
-  uploads,
-  onRetry,
-}: {
-  uploads: readonly Upload[];
-  onRetry: (upload: Upload) => void;
-}) {
+export function ImportList({ uploads, ...actions }: ImportListProps) {
   return (
-    <Stack as="ul" listStyle="none" gap="3" aria-live="polite">
-      {uploads.map((upload) => (
-        <Box as="li" key={upload.key} bg="bg.panel" borderWidth="1px" borderRadius="l3" p="4">
-          <Text fontWeight="semibold" mb="2" overflowWrap="anywhere">
-            {upload.file.name}
-          </Text>
-          <Progress upload={upload} onRetry={onRetry} />
-        </Box>
-      ))}
+    <Stack gap="3">
+      <ImportSum uploads={uploads} onSend={actions.onSend} />
+      <Stack as="ul" listStyle="none" gap="3">
+        {uploads.map((upload) => (
+          <Box as="li" key={upload.key} bg="bg.panel" borderWidth="1px" borderRadius="l3" p="4">
+            <Text fontWeight="semibold" mb="2" overflowWrap="anywhere">
+              {upload.file.name}
+            </Text>
+            <Progress upload={upload} {...actions} />
+          </Box>
+        ))}
+      </Stack>
     </Stack>
   );
 }

@@ -1,26 +1,14 @@
+import type { CsvMatching } from '@halfpitch/ride-files';
 import { useCallback, useRef, useState } from 'react';
-import { MAX_IMPORT_BYTES } from '@halfpitch/contracts';
 import { errorSentence } from '../../app/api-problem';
 import { addImport } from './api/add-import';
 import type { ImportChoice } from './api/add-import';
+import { isTable, refusal } from './upload';
+import type { Upload } from './upload';
 
-export interface Upload {
-  key: number;
-  file: File;
-  choice: ImportChoice;
-  /** Share of the bytes sent. */
-  sent: number;
-  /** The server's number for it, once it is there. */
-  importId: string | null;
-  /** Why it was not sent. */
-  trouble: string | null;
-}
+const GONE = 'The file can no longer be read on this device: choose it again.';
 
-const tooLarge = ({ size }: File) =>
-  size > MAX_IMPORT_BYTES ? `The file is larger than ${MAX_IMPORT_BYTES / 1024 / 1024} MB: split it.` : null;
-const empty = ({ size }: File) => (size === 0 ? 'The file is empty.' : null);
-
-/** Sends files one after the other; one that fails does not hold up the rest. */
+/** Sends files one after the other; one that fails does not hold up the rest, and a table waits to be looked at. */
 export function useUploads() {
   const [uploads, setUploads] = useState<Upload[]>([]);
   const next = useRef(0);
@@ -43,28 +31,38 @@ export function useUploads() {
   );
 
   const enqueue = (upload: Upload) => {
+    change(upload.key, { ...upload, trouble: null, sent: 0 });
     line.current = line.current.then(() => send(upload));
+  };
+
+  const open = async ({ key, file }: Upload) => {
+    try {
+      change(key, { table: new Uint8Array(await file.arrayBuffer()) });
+    } catch {
+      change(key, { trouble: GONE });
+    }
   };
 
   const add = (files: readonly File[], choice: ImportChoice) => {
     const added = files.map((file): Upload => {
       next.current += 1;
-      return {
-        key: next.current,
-        file,
-        choice,
-        sent: 0,
-        importId: null,
-        trouble: tooLarge(file) ?? empty(file),
-      };
+      const trouble = refusal(file);
+      return { key: next.current, file, choice, table: null, sent: 0, importId: null, trouble };
     });
     setUploads((all) => [...all, ...added]);
-    added.filter(({ trouble }) => trouble === null).forEach(enqueue);
+    for (const upload of added.filter(({ trouble }) => trouble === null)) {
+      if (isTable(upload.file)) void open(upload);
+      else enqueue(upload);
+    }
   };
 
-  const retry = (upload: Upload) => {
-    change(upload.key, { trouble: null, sent: 0 });
-    enqueue(upload);
+  return {
+    uploads,
+    add,
+    /** Again, or with other choices. */
+    send: enqueue,
+    match: (upload: Upload, matching: CsvMatching) =>
+      enqueue({ ...upload, table: null, choice: { ...upload.choice, matching } }),
+    leave: ({ key }: Upload) => setUploads((all) => all.filter((one) => one.key !== key)),
   };
-  return { uploads, add, retry };
 }

@@ -1,6 +1,7 @@
 import { rideImport } from '@halfpitch/contracts';
 import { queryOptions } from '@tanstack/react-query';
 import { request } from '../../../app/api';
+import { isThrough } from '../import-words';
 
 const EVERY_MS = 700;
 
@@ -9,6 +10,5 @@ export const importQuery = (id: string) =>
   queryOptions({
     queryKey: ['imports', id],
     queryFn: ({ signal }) => request(`/imports/${id}`, { schema: rideImport, signal }),
-    refetchInterval: ({ state }) =>
-      state.data?.state === 'done' || state.data?.state === 'failed' ? false : EVERY_MS,
+    refetchInterval: ({ state }) => (state.data && isThrough(state.data) ? false : EVERY_MS),
   });
