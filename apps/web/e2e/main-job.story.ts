@@ -54,6 +54,7 @@ test('a new rider, a re-wax, one reminder, and the owner sees it coming', async 
   const mechanic = await open(820, 1180);
   await signIn(mechanic, signInOf('mechanic'));
   await mechanic.getByPlaceholder('Rider, bike or chain').fill(NAME);
+  await expect(mechanic.getByText('1–1 of 1')).toBeVisible();
   await mechanic.getByText(NAME).first().click();
   await choose(mechanic, 'What you do', /^Re-wax/);
   await choose(mechanic, 'How the chain arrived', /^Turning/);
