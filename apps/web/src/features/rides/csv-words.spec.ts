@@ -9,4 +9,10 @@ describe('matchingWords', () => {
       'Semicolon between columns, decimals as 12,5, dates day first, kilometres.',
     );
   });
+
+  it('leaves out what is still asked', () => {
+    const table = new TextEncoder().encode('Tag;weit\n03.04.2025;12,5\n');
+    const { matching, questions } = inspectCsv(table);
+    expect(matchingWords(matching, questions)).toBe('Semicolon between columns.');
+  });
 });

@@ -1,4 +1,4 @@
-import type { CsvField, CsvMatching } from '@halfpitch/ride-files';
+import type { CsvField, CsvMatching, CsvQuestion } from '@halfpitch/ride-files';
 
 /** What the answers about a table are called. */
 export const delimiterWords: Record<CsvMatching['delimiter'], string> = {
@@ -39,13 +39,18 @@ export const fieldWords: Record<CsvField, string> = {
   indoor: 'Indoors',
 };
 
-/** How a table is read, in a sentence: 'Semicolon between columns, decimals as 12,5, day first, kilometres.' */
-export function matchingWords({ delimiter, decimal, dateOrder, distanceUnit }: CsvMatching): string {
+/** What is certain of how a table is read: 'Semicolon between columns, decimals as 12,5, dates day first, kilometres.' */
+export function matchingWords(
+  { delimiter, decimal, dateOrder, distanceUnit }: CsvMatching,
+  questions: readonly Pick<CsvQuestion, 'about'>[] = [],
+): string {
+  const open = new Set(questions.map(({ about }) => about));
+  const known = !open.has('distance');
   const parts = [
     `${delimiterWords[delimiter]} between columns`,
-    `decimals as ${decimalWords[decimal]}`,
-    `dates ${orderWords[dateOrder].toLowerCase()}`,
-    distanceWords[distanceUnit].toLowerCase(),
+    known && !open.has('decimal') && `decimals as ${decimalWords[decimal]}`,
+    !open.has('date') && !open.has('dateOrder') && `dates ${orderWords[dateOrder].toLowerCase()}`,
+    known && !open.has('distanceUnit') && distanceWords[distanceUnit].toLowerCase(),
   ];
-  return `${parts.join(', ')}.`;
+  return `${parts.filter(Boolean).join(', ')}.`;
 }

@@ -44,7 +44,7 @@ export default function TableMatching({ bytes, onAdd, onLeave }: TableMatchingPr
   const isOpen = opened || questions.length > 0;
   return (
     <Stack gap="4">
-      <Text color="fg.muted">{matchingWords(matching)}</Text>
+      <Text color="fg.muted">{matchingWords(matching, questions)}</Text>
       {questions.length > 0 && (
         <Notice>
           {questions.map(({ about, text }) => (
@@ -65,7 +65,9 @@ export default function TableMatching({ bytes, onAdd, onLeave }: TableMatchingPr
           Change how it is read
         </Button>
       )}
-      <TablePreview found={found} />
+      {questions.every(({ about }) => about !== 'date' && about !== 'distance') && (
+        <TablePreview found={found} />
+      )}
       <Flex gap="3" wrap="wrap">
         <Button disabled={questions.length > 0 || rides === 0} onClick={() => onAdd(matching)}>
           {rides === 0 ? 'No ride to add' : `Add ${rideCount(rides)}`}
