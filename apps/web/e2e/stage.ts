@@ -1,3 +1,4 @@
+import AxeBuilder from '@axe-core/playwright';
 import { expect, type Page, test as base } from '@playwright/test';
 
 interface SignIn {
@@ -61,6 +62,14 @@ export async function letterTo(address: string): Promise<Letter> {
 export async function laterBy(page: Page, days: number): Promise<void> {
   const answer = await page.request.post('/api/test/clock', { data: { days }, timeout: 100_000 });
   expect(answer.ok()).toBe(true);
+}
+
+/** No violation of WCAG 2.2 A and AA that axe can find on the page as it stands. */
+export async function expectAccessible(page: Page): Promise<void> {
+  const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
+  const { violations } = await new AxeBuilder({ page }).withTags(tags).analyze();
+  const found = violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(' | ')}`);
+  expect(found, page.url()).toEqual([]);
 }
 
 export { expect };

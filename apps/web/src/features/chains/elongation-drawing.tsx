@@ -29,7 +29,11 @@ const month = new Intl.DateTimeFormat('en-GB', { month: 'short', year: '2-digit'
 export default function ElongationDrawing({ points, strokes, limit, top, today }: ElongationDrawingProps) {
   return (
     <ResponsiveContainer width="100%" height="100%">
-      <ComposedChart data={points} margin={{ top: 12, right: 16, bottom: 4, left: 0 }}>
+      <ComposedChart
+        data={points}
+        margin={{ top: 12, right: 16, bottom: 4, left: 0 }}
+        accessibilityLayer={false}
+      >
         <CartesianGrid stroke={chartColours.grid} vertical={false} />
         <XAxis
           dataKey="time"

@@ -31,7 +31,7 @@ export default function UsageDrawing({ now, before, life, unit }: UsageDrawingPr
   const top = Math.ceil((highest * 1.05) / metres / 50) * 50;
   return (
     <ResponsiveContainer width="100%" height="100%">
-      <LineChart margin={{ top: 12, right: 16, bottom: 4, left: 0 }}>
+      <LineChart margin={{ top: 12, right: 16, bottom: 4, left: 0 }} accessibilityLayer={false}>
         <CartesianGrid stroke={chartColours.grid} vertical={false} />
         <XAxis
           dataKey="days"

@@ -62,11 +62,7 @@ function TwelveWeeks({ load }: { load: Workload }) {
       <Text color="fg.muted" maxWidth="52rem">
         {comingSummary(load.coming)}
       </Text>
-      <Grid
-        templateColumns={{ base: '1fr', xl: 'minmax(0, 3fr) minmax(0, 2fr)' }}
-        gap="10"
-        alignItems="start"
-      >
+      <Grid templateColumns={{ base: '1fr', xl: 'max-content minmax(0, 1fr)' }} gap="10" alignItems="start">
         <WeekTable load={load} chosen={week?.from} onChoose={choose} />
         {week && <WeekChains week={week} />}
       </Grid>
