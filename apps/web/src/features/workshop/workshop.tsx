@@ -13,7 +13,7 @@ export function Workshop() {
     <>
       <PageHeader
         title="Workshop"
-        lead="What every estimate and reminder here is worked out with. Changes count from the next estimate of each chain, tonight at the latest."
+        lead="What every estimate and reminder here is worked out with. Each chain is estimated anew as soon as you save."
       />
       <Grid
         templateColumns={{ base: 'minmax(0, 1fr)', xl: 'minmax(0, 1fr) 24rem' }}
